@@ -1,0 +1,36 @@
+import { fileURLToPath } from 'node:url'
+import { defineConfig } from 'vitest/config'
+
+const root = (path: string) => fileURLToPath(new URL(path, import.meta.url))
+
+const resolve = {
+  alias: [
+    // Throws outside Next's bundler; here it stands for nothing.
+    { find: /^server-only$/, replacement: root('./tests/support/server-only.ts') },
+    { find: /^@\//, replacement: root('./') },
+  ],
+}
+
+const files = (folder: string) => [`tests/${folder}/**/*.test.{ts,tsx,mjs}`]
+
+export default defineConfig({
+  test: {
+    // A forgotten `.only` would let the rest pass unseen.
+    allowOnly: false,
+    projects: [
+      { resolve, test: { name: 'unit', include: files('unit') } },
+      {
+        resolve,
+        test: {
+          name: 'service',
+          include: files('service'),
+          globalSetup: ['tests/support/global-database.ts'],
+          testTimeout: 30_000,
+          hookTimeout: 60_000,
+        },
+      },
+      // ffmpeg and real child processes: a long rope, so that a busy machine is not a failure.
+      { resolve, test: { name: 'media', include: files('media'), testTimeout: 180_000, hookTimeout: 180_000 } },
+    ],
+  },
+})
