@@ -1,0 +1,38 @@
+'use client'
+
+import Link from 'next/link'
+import { usePathname } from 'next/navigation'
+import { deskLinks } from './nav-links'
+
+type DeskBarProps = {
+  channel: { slug: string; name: string }
+  /** Whether the way to the channel's people stands here; only its owners have it. */
+  people: boolean
+}
+
+/** The second bar: one channel's workspace. */
+export function DeskBar({ channel, people }: DeskBarProps) {
+  const links = deskLinks(usePathname(), channel.slug, people)
+  return (
+    <div className="no-print border-b border-rule bg-sheet">
+      <div className="page flex flex-wrap items-center gap-x-7 md:flex-nowrap">
+        <p className="pt-2.5 font-display text-lg font-semibold whitespace-nowrap md:pt-0">{channel.name} desk</p>
+        <nav aria-label={`${channel.name} desk`} className="min-w-0 overflow-x-auto">
+          <ul className="flex gap-7">
+            {links.map(({ href, label, current }) => (
+              <li key={href}>
+                <Link
+                  href={href}
+                  aria-current={current}
+                  className="flex h-13.5 items-center border-y-3 border-transparent whitespace-nowrap text-ink-2 no-underline hover:text-ink hover:no-underline aria-[current]:border-b-act aria-[current]:font-semibold aria-[current]:text-ink"
+                >
+                  {label}
+                </Link>
+              </li>
+            ))}
+          </ul>
+        </nav>
+      </div>
+    </div>
+  )
+}

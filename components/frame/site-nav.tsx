@@ -1,0 +1,27 @@
+'use client'
+
+import Link from 'next/link'
+import { usePathname } from 'next/navigation'
+import { siteLinks } from './nav-links'
+
+/** The parts of the place one is in, along the bar. */
+export function SiteNav() {
+  const links = siteLinks(usePathname())
+  return (
+    <nav aria-label="Main" className="hidden md:block">
+      <ul className="flex gap-5 lg:gap-6.5">
+        {links.map(({ href, label, current }) => (
+          <li key={href}>
+            <Link
+              href={href}
+              aria-current={current}
+              className="flex h-15 items-center border-y-3 border-transparent text-[1rem] text-on-loam-2 no-underline hover:text-on-loam hover:no-underline aria-[current]:border-b-on-loam aria-[current]:text-on-loam"
+            >
+              {label}
+            </Link>
+          </li>
+        ))}
+      </ul>
+    </nav>
+  )
+}
