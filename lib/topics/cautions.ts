@@ -1,4 +1,4 @@
-import type { JobName } from './jobs'
+import type { JobName } from './field-jobs'
 
 /**
  * How far a citation was followed: `V` the rule's text or an official page quoting it was opened, `V2` as someone else

@@ -1,6 +1,6 @@
 import type { Crop } from './crops'
-import { jobTopics } from './jobs'
-import type { StageKey } from './stage-words'
+import { jobTopics } from './field-jobs'
+import { stageWord, type StageKey } from './stage-words'
 import { stageTopics } from './stages'
 import { subjectTopics } from './subjects'
 
@@ -49,4 +49,26 @@ export function stageOf(codes: string[]): StageKey | null {
     if (stage) return stage
   }
   return null
+}
+
+const searchable = topics.map((topic) => ({
+  topic,
+  words: `${topic.label} ${topic.code} ${topic.bbch ?? ''} ${topic.stage ? stageWord(topic.stage, topic.crop) : ''}`
+    .toLowerCase()
+    .split(/[^\p{L}\p{N}%]+/u),
+}))
+
+/**
+ * The topics that a person typing means: every typed word begins a word of the topic. A number is read as a code
+ * first ("wheat 2" opens with wheat's stage 2) and as a count after that (two leaves). Nothing typed gives what a list
+ * can show at a glance: principal stages, jobs and subjects.
+ */
+export function findTopics(typed: string): Topic[] {
+  const sought = typed.toLowerCase().match(/[\p{L}\p{N}%]+/gu) ?? []
+  if (sought.length === 0) return topics.filter((topic) => topic.bbch?.length !== 2)
+  const found = searchable
+    .filter(({ words }) => sought.every((start) => words.some((word) => word.startsWith(start))))
+    .map(({ topic }) => topic)
+  const byNumber = (topic: Topic) => sought.some((start) => /^\d/.test(start) && topic.bbch?.startsWith(start))
+  return [...found.filter(byNumber), ...found.filter((topic) => !byNumber(topic))]
 }

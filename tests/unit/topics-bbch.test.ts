@@ -1,7 +1,17 @@
 import { describe, expect, it } from 'vitest'
 import { cautions, cautionsFor } from '@/lib/topics/cautions'
-import { hazardousJobs } from '@/lib/topics/jobs'
-import { crops, stageKeys, stageOf, stageWord, topicByCode, topicMatches, topics, type Crop } from '@/lib/topics/rules'
+import { hazardousJobs } from '@/lib/topics/field-jobs'
+import {
+  crops,
+  findTopics,
+  stageKeys,
+  stageOf,
+  stageWord,
+  topicByCode,
+  topicMatches,
+  topics,
+  type Crop,
+} from '@/lib/topics/rules'
 
 /**
  * Source: U. Meier (ed.), Growth stages of mono- and dicotyledonous plants, BBCH Monograph, 2nd ed. 2001
@@ -134,5 +144,28 @@ describe('cautions', () => {
 
   it('are none for a chapter that files no hazardous job', () => {
     expect(cautionsFor(['job-scouting', 'wheat-21', 'subject-safety'])).toEqual([])
+  })
+})
+
+describe('typing for a topic', () => {
+  const codes = (typed: string) => findTopics(typed).map((topic) => topic.code)
+
+  it('finds a stage by crop and number, principal first', () => {
+    expect(codes('wheat 2').slice(0, 3)).toEqual(['wheat-2', 'wheat-20', 'wheat-21'])
+    expect(codes('WHEAT 21')).toEqual(['wheat-21'])
+  })
+
+  it('finds stages, jobs and subjects by the beginnings of their words, in any order', () => {
+    expect(codes('grain bin')).toEqual(['job-grain-bin'])
+    expect(codes('initiation rice')).toEqual(['rice-30'])
+    expect(codes('wat')).toContain('subject-water')
+    expect(codes('boot')).toEqual(expect.arrayContaining(['wheat-4', 'wheat-41', 'rice-45']))
+  })
+
+  it('offers principal stages, jobs and subjects before anything is typed, and nothing for a word that fits none', () => {
+    expect(codes('  ')).toEqual(expect.arrayContaining(['soil', 'rice-3', 'job-harvest', 'subject-safety']))
+    expect(codes('')).not.toContain('wheat-21')
+    expect(codes('zebra')).toEqual([])
+    expect(codes('.*')).toEqual(codes(''))
   })
 })
