@@ -1,4 +1,4 @@
-import { existsSync, readFileSync, renameSync, rmSync, writeFileSync } from 'node:fs'
+import { existsSync, readFileSync, realpathSync, renameSync, rmSync, writeFileSync } from 'node:fs'
 import path from 'node:path'
 import { setTimeout as sleep } from 'node:timers/promises'
 import { fileURLToPath } from 'node:url'
@@ -29,6 +29,12 @@ function isAlive(data) {
   const pid = postmaster(data)?.pid
   if (!pid || !existsSync(`/proc/${pid}/cmdline`)) return false
   return readFileSync(`/proc/${pid}/cmdline`, 'utf8').split('\0').includes(data)
+}
+
+/** True where the cluster of that folder lives; asks nothing of PostgreSQL, so it may be called before that is installed. */
+export function clusterRuns(directory) {
+  const data = path.join(directory, 'data')
+  return existsSync(data) && isAlive(realpathSync(data))
 }
 
 /** Made beside its final name and renamed: a cluster cut off half-way is never mistaken for a whole one. */
@@ -124,6 +130,19 @@ export async function startCluster({ directory, port = 5544, durable = true, nam
 /** Ends the cluster of a folder, if one runs. */
 export async function stopCluster({ directory }) {
   await shutDown(path.join(await clusterHome(path.resolve(directory)), 'data'))
+}
+
+/** Brings a cluster back that was killed while we need it. @returns a function that ends the watch */
+export function watchCluster(options) {
+  const look = async () => {
+    if (!clusterRuns(options.directory)) {
+      console.log('! the database ended; starting it again')
+      await startCluster(options).catch((error) => console.error(sentenceFor(error)))
+    }
+    timer = setTimeout(look, 3000)
+  }
+  let timer = setTimeout(look, 3000)
+  return () => clearTimeout(timer)
 }
 
 async function command() {
