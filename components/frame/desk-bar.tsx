@@ -24,7 +24,7 @@ export function DeskBar({ channel, people }: DeskBarProps) {
                 <Link
                   href={href}
                   aria-current={current}
-                  className="flex h-13.5 items-center border-y-3 border-transparent whitespace-nowrap text-ink-2 no-underline hover:text-ink hover:no-underline aria-[current]:border-b-act aria-[current]:font-semibold aria-[current]:text-ink"
+                  className="flex h-13.5 items-center whitespace-nowrap text-ink-2 no-underline hover:text-ink hover:no-underline aria-[current]:font-semibold aria-[current]:text-ink aria-[current]:shadow-[inset_0_-3px_0_var(--color-act)]"
                 >
                   {label}
                 </Link>

@@ -7,24 +7,24 @@ import { siteLinks } from './nav-links'
 import { SearchForm } from './search-form'
 
 const summary =
-  'flex min-h-13 items-center px-2 font-semibold text-on-loam group-open:underline group-open:decoration-2'
+  'flex min-h-13 items-center px-2 font-semibold text-on-loam md:min-h-11 md:text-sm group-open:underline group-open:decoration-2'
 const panel = 'absolute inset-x-0 top-full z-30 border-b border-loam-rule bg-loam px-3.5 pt-1 pb-4'
 
 /**
- * Find and Menu on a narrow screen. `<details>` of one name: one closes the other, without any script; the key closes
- * both when a link has brought another page.
+ * Find and Menu on a narrow screen; on a middling one Find alone, for want of room for its field. `<details>` of one
+ * name: one closes the other, without any script. The key closes both when a link has brought another page.
  */
 export function NarrowMenu({ children }: { children: ReactNode }) {
   const pathname = usePathname()
   return (
-    <div key={pathname} className="-mr-2 ml-auto flex md:hidden">
+    <div key={pathname} className="-mr-2 ml-auto flex lg:hidden">
       <details name="narrow-menu" className="group">
         <summary className={summary}>Find</summary>
         <div className={panel}>
           <SearchForm withButton />
         </div>
       </details>
-      <details name="narrow-menu" className="group">
+      <details name="narrow-menu" className="group md:hidden">
         <summary className={summary}>Menu</summary>
         <div className={panel}>
           <nav aria-label="Main">

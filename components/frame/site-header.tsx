@@ -20,11 +20,11 @@ export function SiteHeader({ person }: { person: FramePerson | null }) {
           Turnrow
         </Link>
         <SiteNav />
-        <SearchForm className="ml-auto hidden w-75 min-w-0 shrink md:flex" />
-        <PersonMenu person={person} />
+        <SearchForm className="ml-auto hidden w-75 min-w-0 shrink lg:flex" />
         <NarrowMenu>
           <PersonLinks person={person} className="border-t border-loam-rule" />
         </NarrowMenu>
+        <PersonMenu person={person} />
       </div>
     </header>
   )

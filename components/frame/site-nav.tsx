@@ -15,7 +15,7 @@ export function SiteNav() {
             <Link
               href={href}
               aria-current={current}
-              className="flex h-15 items-center border-y-3 border-transparent text-[1rem] text-on-loam-2 no-underline hover:text-on-loam hover:no-underline aria-[current]:border-b-on-loam aria-[current]:text-on-loam"
+              className="flex h-15 items-center text-[1rem] text-on-loam-2 no-underline hover:text-on-loam hover:no-underline aria-[current]:text-on-loam aria-[current]:shadow-[inset_0_-3px_0_var(--color-on-loam)]"
             >
               {label}
             </Link>

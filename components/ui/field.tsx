@@ -16,7 +16,7 @@ type FieldProps = FieldWords & { id?: string; className?: string; children: (con
 
 /** The look of anything that takes typing. */
 export const controlClass =
-  'block min-h-11 w-full border border-edge bg-sheet px-3 py-2 text-base text-ink placeholder:text-ink-3 aria-invalid:border-2 aria-invalid:border-fault disabled:border-dashed disabled:text-ink-3 read-only:bg-ground'
+  'block min-h-11 w-full border border-edge bg-sheet px-3 py-2 text-base text-ink placeholder:text-ink-3 aria-invalid:border-2 aria-invalid:border-fault disabled:border-dashed disabled:text-ink-3 [&[readonly]]:bg-ground'
 
 /** A label, its control, its hint and its error, tied together for assistive technology. */
 export function Field({ label, hint, error, id, className, children }: FieldProps) {

@@ -27,7 +27,7 @@ export function Progress({ value, label, detail }: ProgressProps) {
         className="h-3.5 border-[1.5px] border-ink bg-sheet"
       >
         <svg className="block size-full" aria-hidden="true">
-          <rect className="fill-act" width={`${percent ?? 0}%`} height="100%" />
+          <rect className="fill-act forced-colors:fill-[Highlight]" width={`${percent ?? 0}%`} height="100%" />
         </svg>
       </div>
       {detail && <p className="mt-1.5 text-sm text-ink-3">{detail}</p>}
