@@ -4,11 +4,8 @@ import Link from 'next/link'
 import { Popover } from 'radix-ui'
 import { useId, useRef, useState, type MouseEvent, type ReactNode } from 'react'
 import type { TermNote } from '@/lib/handbook/views'
+import { termClass } from './term-class'
 import { TermSheet } from './term-sheet'
-
-/** Underlined with dots, so that a term is not taken for an ordinary link. */
-export const termClass =
-  'cursor-help text-inherit underline decoration-water decoration-dotted decoration-2 underline-offset-4 hover:decoration-solid'
 
 const opensElsewhere = (event: MouseEvent) =>
   event.button !== 0 || event.metaKey || event.ctrlKey || event.shiftKey || event.altKey
@@ -21,6 +18,7 @@ export function TermLink({ note, children }: { note: TermNote; children: ReactNo
   const [open, setOpen] = useState(false)
   const link = useRef<HTMLAnchorElement>(null)
   const headingId = useId()
+  const leftByPointer = useRef(false)
 
   function toggle(event: MouseEvent) {
     // The sentence around a term may be a control of its own (it seeks); a term's tap is the term's alone.
@@ -52,13 +50,15 @@ export function TermLink({ note, children }: { note: TermNote; children: ReactNo
           collisionPadding={12}
           className="z-50 w-80 max-w-[calc(100vw-1.5rem)] focus:outline-none"
           onClick={(event) => event.stopPropagation()}
-          // Pressing the term again is for its own click to answer; closing here would only open it again.
+          onOpenAutoFocus={() => (leftByPointer.current = false)}
           onInteractOutside={(event) => {
+            // Pressing the term again is for its own click to answer; closing here would only open it again.
             if (event.target instanceof Node && link.current?.contains(event.target)) event.preventDefault()
+            else leftByPointer.current = true
           }}
           onCloseAutoFocus={(event) => {
             event.preventDefault()
-            link.current?.focus({ preventScroll: true })
+            if (!leftByPointer.current) link.current?.focus({ preventScroll: true })
           }}
         >
           <TermSheet note={note} headingId={headingId} />

@@ -2,7 +2,8 @@ import Link from 'next/link'
 import { Fragment } from 'react'
 import { cutAtMentions } from '@/lib/handbook/rules'
 import type { Mention, TermNotes } from '@/lib/handbook/views'
-import { TermLink, termClass } from './term-link'
+import { termClass } from './term-class'
+import { TermLink } from './term-link'
 
 type TermTextProps = {
   text: string
