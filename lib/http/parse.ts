@@ -1,0 +1,72 @@
+import type { z } from 'zod'
+import { type FieldError, editionNeeded, malformed, tooLarge, unprocessable, wrongType } from '@/lib/errors'
+
+const JSON_LIMIT = 1024 * 1024
+
+const fieldErrors = (error: z.ZodError): FieldError[] =>
+  error.issues.map((issue) => ({ path: issue.path.join('.'), message: issue.message }))
+
+/** PostgreSQL text cannot hold U+0000; said here, it is a 400 and not a 500. */
+const refuseNul = (raw: string) => {
+  if (raw.includes('\u0000') || raw.includes('\\u0000')) throw malformed('The text holds a NUL character.')
+}
+
+export function parseQuery<T>(schema: z.ZodType<T>, url: URL): T {
+  const plain: Record<string, string> = {}
+  for (const [name, value] of url.searchParams) {
+    if (name in plain) throw malformed(`“${name}” is given twice.`)
+    refuseNul(value)
+    plain[name] = value
+  }
+  const read = schema.safeParse(plain)
+  if (!read.success) throw malformed('The query is not understood.', fieldErrors(read.error))
+  return read.data
+}
+
+export function parseParams<T>(schema: z.ZodType<T>, params: unknown): T {
+  const read = schema.safeParse(params)
+  if (!read.success) throw malformed('The address is not understood.', fieldErrors(read.error))
+  return read.data
+}
+
+/**
+ * Reads JSON and holds it against the schema.
+ * Broken JSON or a wrong shape is 400; a rule of the domain marked `params: { rule: true }` is 422.
+ */
+export async function parseJson<T>(schema: z.ZodType<T>, request: Request): Promise<T> {
+  const raw = await request.text()
+  if (raw.length > JSON_LIMIT) throw tooLarge('At most 1 MB of JSON.')
+  const type = request.headers.get('content-type') ?? ''
+  if (raw !== '' && !/^application\/(json|[\w.+-]+\+json)\b/i.test(type)) throw wrongType('Send application/json.')
+  refuseNul(raw)
+  const read = schema.safeParse(jsonOf(raw))
+  if (read.success) return read.data
+  const errors = fieldErrors(read.error)
+  const onlyRules = read.error.issues.every((issue) => issue.code === 'custom' && issue.params?.rule === true)
+  throw onlyRules
+    ? unprocessable(errors[0]?.message ?? 'A rule is broken.', errors)
+    : malformed(summary(errors), errors)
+}
+
+const summary = (errors: FieldError[]) => {
+  const first = errors[0]
+  return first ? `${first.path || 'body'}: ${first.message}` : 'The body is not understood.'
+}
+
+function jsonOf(raw: string): unknown {
+  if (raw === '') return {}
+  try {
+    return JSON.parse(raw, (key, value: unknown) => (key === '__proto__' ? undefined : value))
+  } catch {
+    throw malformed('The body is not JSON.')
+  }
+}
+
+/** The edition the caller read. @throws Problem 428 without If-Match, 400 when it is not one of our ETags */
+export function parseEdition(request: Request): number {
+  const given = request.headers.get('if-match')
+  if (given === null) throw editionNeeded()
+  const read = /^(?:W\/)?"?(\d+)"?$/.exec(given.trim())
+  if (!read) return -1
+  return Number(read[1])
+}

@@ -1,0 +1,16 @@
+import { sendLetter } from '@/lib/mail/jobs'
+import type { Job } from './queue'
+
+type Body<T> = (data: T) => Promise<unknown>
+export type Registered = { job: Job<never>; load: () => Promise<Body<never>>; cron?: string }
+
+const on = <T>(job: Job<T>, load: () => Promise<Body<T>>, cron?: string): Registered => ({
+  job: job as unknown as Job<never>,
+  load,
+  cron,
+})
+
+/** Every kind of job and the body that does it. Bodies are loaded when the first such job arrives, and only in the worker. */
+export const registry: readonly Registered[] = [
+  on(sendLetter, async () => (await import('@/lib/mail/send-letter')).sendLetterById),
+]
