@@ -1,13 +1,20 @@
-import { openHouse, Stopped } from './house.mjs'
+import { House, Stopped } from './house.mjs'
 import { sweepLeftovers } from './leftovers.mjs'
 import { lockFolder } from './lock.mjs'
 import { mustHaveRoom, portsMustBeFree } from './preflight.mjs'
-import { prepareBuild, prepareDatabase, prepareDemo, prepareMachine } from './prepare.mjs'
+import { prepareBuild, prepareDatabase, prepareDemo, prepareMachine, prepareSchema } from './prepare.mjs'
 import { serversFor } from './servers.mjs'
 import { loadEnvFile, settingsFrom } from './settings.mjs'
 import { firstSignal } from './signals.mjs'
 import { sentenceFor } from './trouble.mjs'
 import { welcome } from './welcome.mjs'
+
+/** Does pieces of work side by side; throws the first failure once all have come to their end. */
+async function together(...works) {
+  const ended = await Promise.allSettled(works.map((work) => work()))
+  const failed = ended.find(({ status }) => status === 'rejected')
+  if (failed) throw failed.reason
+}
 
 /** Prepares whatever is missing, then starts every server. `mode` is start or dev; dev builds nothing beforehand. */
 async function bringUp(house, settings, mode) {
@@ -15,13 +22,14 @@ async function bringUp(house, settings, mode) {
   await portsMustBeFree(settings)
   await prepareMachine(house, settings)
   const env = await prepareDatabase(house, settings, process.env)
+  const start = (server) => () =>
+    house.step(`Starting the ${server.name}`, () => house.startServer(server, { root: settings.root, env }))
+  const { standIns, worker, web } = serversFor({ ...settings, mode })
+  await together(() => prepareSchema(house, settings, env), ...standIns.map(start))
   if (mode === 'start') await prepareBuild(house, settings, env)
-  const servers = serversFor({ ...settings, mode })
-  for (const server of servers) {
-    // The demo wants mail and search to be there; the worker would take up its films before they are whole.
-    if (server.name === 'worker') await prepareDemo(house, settings, env)
-    await house.step(`Starting the ${server.name}`, () => house.startServer(server, { root: settings.root, env }))
-  }
+  // The demo writes letters and search entries, and the worker would take up its films before they are whole.
+  await prepareDemo(house, settings, env)
+  await together(start(worker), start(web))
   console.log(welcome(settings, ((performance.now() - since) / 1000).toFixed(1)))
 }
 
@@ -34,7 +42,7 @@ export async function main(mode) {
     mustHaveRoom(settings)
     await lockFolder(settings.dataDir, settings.baseUrl)
     if ((await sweepLeftovers(settings.dataDir)) > 0) console.log('· Ended what an earlier start had left running')
-    house = openHouse(settings.dataDir)
+    house = new House(settings.dataDir)
     const signal = firstSignal(house)
     await bringUp(house, settings, mode)
     await signal

@@ -63,11 +63,10 @@ export async function clusterHome(wanted) {
   return home
 }
 
+/** A folder that was there beforehand (a temporary one) is given over too, as long as no cluster lies in it. */
 async function ownedFolder(home) {
-  if (!existsSync(home)) {
-    mkdirSync(home, { recursive: true })
-    await giveToServer(home)
-  }
+  mkdirSync(home, { recursive: true })
+  if (!existsSync(path.join(home, 'data'))) await giveToServer(home)
   return home
 }
 

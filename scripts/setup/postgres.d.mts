@@ -1,5 +1,7 @@
+/** See postgres.mjs, which stays plain JavaScript because it runs before anything is installed. */
 export function startCluster(options: {
   directory: string
-  port: number
+  port?: number
   durable?: boolean
-}): Promise<{ url: string; stop: () => Promise<void> }>
+  name?: string
+}): Promise<{ url: string; home: string; stop: () => Promise<void> }>

@@ -2,7 +2,7 @@ import { existsSync, writeFileSync } from 'node:fs'
 import path from 'node:path'
 import { installPackages, missingPackages } from './debian.mjs'
 import { installModules, modulesAreStale } from './node-modules.mjs'
-import { startCluster, stopCluster, watchCluster } from './postgres.mjs'
+import { killCluster, startCluster, stopCluster, watchCluster } from './postgres.mjs'
 import { mustRun } from './run.mjs'
 import { secretsIn } from './secrets.mjs'
 import { environmentFor } from './settings.mjs'
@@ -27,9 +27,10 @@ export async function prepareMachine(house, { root, owns, demo }, extraPackages 
 async function openDatabase(house, { dataDir, databasePort, owns, durable = true }, from) {
   if (!owns.database) return from.DATABASE_URL
   const options = { directory: path.join(dataDir, 'postgres'), port: databasePort, durable }
-  house.keep({ name: 'database', end: () => stopCluster(options) })
+  house.keep({ end: () => stopCluster(options), kill: () => killCluster(options.directory) })
   const { url } = await house.step(`Starting PostgreSQL on port ${databasePort}`, () => startCluster(options))
-  house.keep({ name: 'watch over the database', end: watchCluster(options) })
+  const endWatch = watchCluster(options)
+  house.keep({ end: endWatch, kill: endWatch })
   return url
 }
 
@@ -37,15 +38,15 @@ async function openDatabase(house, { dataDir, databasePort, owns, durable = true
 export const runScript = (root, env, file, say) =>
   mustRun(process.execPath, ['--import', 'tsx', path.join(root, file)], { cwd: root, env, onText: say })
 
-/** Database and migrations. @returns the environment for every part of the product */
+/** The database is there. @returns the environment for every part of the product */
 export async function prepareDatabase(house, settings, from) {
   const url = await openDatabase(house, settings, from)
-  const env = environmentFor(settings, from, url, secretsIn(settings.dataDir))
-  await house.step('Bringing the database up to date', (say) =>
-    runScript(settings.root, env, 'scripts/migrate.ts', say),
-  )
-  return env
+  return environmentFor(settings, from, url, secretsIn(settings.dataDir))
 }
+
+/** Migrations and queues; run on every start, for a restored database may be an older one. */
+export const prepareSchema = (house, { root }, env) =>
+  house.step('Bringing the database up to date', (say) => runScript(root, env, 'scripts/migrate.ts', say))
 
 /** The demo, once: the note is written last, so a seeding that was cut off is run again. */
 export async function prepareDemo(house, { root, dataDir, demo }, env) {

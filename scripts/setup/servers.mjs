@@ -1,5 +1,4 @@
 import path from 'node:path'
-import { setTimeout as sleep } from 'node:timers/promises'
 import { answersOk, listensOn } from './ready.mjs'
 
 const script = (root, file) => ['--import', 'tsx', path.join(root, file)]
@@ -26,36 +25,32 @@ function web({ root, host, port, mode }) {
   }
 }
 
-/** Its queues are made while it starts, so it goes before the web; it has no port to ask. */
-function worker({ root }) {
-  const since = { at: 0 }
-  return {
-    name: 'worker',
-    args: script(root, 'scripts/worker.ts'),
-    nodeEnv: 'production',
-    isReady: async () => {
-      since.at ||= performance.now()
-      await sleep(200)
-      return performance.now() - since.at > 1500
-    },
-    stopSeconds: 25,
-  }
-}
+/** It has no port to ask; it says so itself when it has taken up its queues. */
+const worker = ({ root }) => ({
+  name: 'worker',
+  args: script(root, 'scripts/worker.ts'),
+  nodeEnv: 'production',
+  isReady: (said) => said.includes('Worker is ready.'),
+  stopSeconds: 25,
+})
 
-/** The servers of the product in the order of their start; the end goes backwards. */
-export function serversFor({ mode, ...settings }) {
-  const { root, owns, mailSmtpPort, mailPagePort, searchPort } = settings
-  const fake = (name, ...ports) => ({
-    name: `${name} stand-in`,
-    args: script(root, `fakes/${name}/main.ts`),
-    nodeEnv: 'production',
-    isReady: async () => (await Promise.all(ports.map((port) => listensOn(port)))).every(Boolean),
-    stopSeconds: 5,
-  })
-  return [
-    ...(owns.mail ? [fake('mail', mailSmtpPort, mailPagePort)] : []),
-    ...(owns.search ? [fake('search', searchPort)] : []),
-    worker(settings),
-    web({ ...settings, mode }),
-  ]
+/** A real server on loopback in place of a hosted service; ready when all its ports take connections. */
+const standIn = (root, name, ...ports) => ({
+  name: `${name} stand-in`,
+  args: script(root, `fakes/${name}/main.ts`),
+  nodeEnv: 'production',
+  isReady: async () => (await Promise.all(ports.map((port) => listensOn(port)))).every(Boolean),
+  stopSeconds: 5,
+})
+
+/** The servers of the product: stand-ins for the services whose address was not given, the worker, the web. */
+export function serversFor({ root, host, port, mode, owns, mailSmtpPort, mailPagePort, searchPort }) {
+  return {
+    standIns: [
+      ...(owns.mail ? [standIn(root, 'mail', mailSmtpPort, mailPagePort)] : []),
+      ...(owns.search ? [standIn(root, 'search', searchPort)] : []),
+    ],
+    worker: worker({ root }),
+    web: web({ root, host, port, mode }),
+  }
 }

@@ -59,6 +59,8 @@ export function environmentFor(settings, from, url, secrets) {
     MAIL_PAGE_PORT: String(mailPagePort),
     SEARCH_PORT: String(searchPort),
     DATA_DIR: dataDir,
+    MAIL_DIR: path.join(dataDir, 'mail'),
+    SEARCH_DIR: path.join(dataDir, 'search'),
     // Marks everything we start, whatever becomes of us: see leftovers.mjs.
     TURNROW_HOME: dataDir,
   }

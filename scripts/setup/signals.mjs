@@ -24,7 +24,23 @@ export function firstSignal(house) {
       }
     }
     for (const name of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(name, () => onSignal(name))
+    whenNpmDies(() => onSignal('npm ended'))
     // Whoever read our words may leave before us.
     for (const stream of [process.stdout, process.stderr]) stream.on('error', () => {})
   })
+}
+
+/**
+ * Killed with -9, npm passes nothing on; without this we would live on unseen.
+ * Started without npm we outlive our parent, as somebody who wrote `nohup node …` means it.
+ */
+function whenNpmDies(then) {
+  if (!process.env.npm_lifecycle_event) return
+  const parent = process.ppid
+  const look = setInterval(() => {
+    if (process.ppid === parent) return
+    clearInterval(look)
+    then()
+  }, 500)
+  look.unref()
 }
