@@ -133,7 +133,8 @@ function watch(
     finish()
   }
   run.signal?.addEventListener('abort', onAbort, { once: true })
-  command.on('start', () => ended === null && run.signal?.aborted && onAbort())
+  // What was asked to stop before there was a process has to be told again.
+  command.on('start', () => ended && stop(ended))
   command.on('stderr', (line: string) => {
     const seconds = /^out_time_us=(\d+)/.exec(line)
     if (!seconds) return void (isProgress(line) || (lastWords.push(line), lastWords.splice(0, lastWords.length - 20)))

@@ -1,4 +1,4 @@
-import { stat } from 'node:fs/promises'
+import { open, stat } from 'node:fs/promises'
 import { MediaFailure } from './failure'
 import { limits, takenAudioCodecs, takenFormats, takenVideoCodecs } from './limits'
 import { probe, readPackets, type Probe, type ProbedStream } from './probe'
@@ -61,7 +61,7 @@ export async function inspectFilm(path: string): Promise<Inspection> {
   try {
     found = await probe(path)
   } catch (error) {
-    return refusalOf(error)
+    return refusalOf(path, error)
   }
   const formats = found.format.format_name.split(',')
   if (!formats.some((name) => (takenFormats as readonly string[]).includes(name))) return notAFilm
@@ -76,9 +76,23 @@ export async function inspectFilm(path: string): Promise<Inspection> {
   return refuseByStream(video) ?? (await measured(path, found, video))
 }
 
-function refusalOf(error: unknown): Inspection {
+/** The types of box that an MP4 or QuickTime file begins with (ISO/IEC 14496-12). */
+const firstBoxes = ['ftyp', 'moov', 'mdat', 'wide', 'free', 'skip', 'pnot']
+
+async function beginsLikeMp4(path: string): Promise<boolean> {
+  const file = await open(path, 'r')
+  try {
+    const { buffer, bytesRead } = await file.read(Buffer.alloc(8), 0, 8, 0)
+    return bytesRead === 8 && firstBoxes.includes(buffer.toString('latin1', 4, 8))
+  } finally {
+    await file.close()
+  }
+}
+
+async function refusalOf(path: string, error: unknown): Promise<Inspection> {
   if (!(error instanceof MediaFailure) || error.kind !== 'invalid') throw error
-  if (/moov atom not found/i.test(error.technical)) return incomplete(0)
+  // The name alone makes ffprobe look for an MP4's index, whatever is inside.
+  if (/moov atom not found/i.test(error.technical) && (await beginsLikeMp4(path))) return incomplete(0)
   const untaken = /Codec \((\w+)\) not on whitelist/.exec(error.technical)?.[1]
   if (untaken) {
     return refuse(
@@ -143,7 +157,7 @@ async function measured(path: string, found: Probe, video: ProbedStream): Promis
       duration = real
     }
   } catch (error) {
-    return refusalOf(error)
+    return refusalOf(path, error)
   }
   return lengthChecked(describe(found, video, duration ?? 0, notes))
 }

@@ -7,6 +7,7 @@ import { runFfmpeg } from './ffmpeg'
 import { pictureGraph } from './filters'
 import type { Track } from './hls'
 import { ladderFor, steadyRate } from './ladder'
+import { probe } from './probe'
 
 /** One picture for before it plays: from a fifth into the film, where the talking has begun, the least odd of a few. */
 export async function makePoster(
@@ -37,11 +38,18 @@ export async function makePoster(
 }
 
 async function joinSegments(working: string, track: Track, to: string): Promise<void> {
-  const out = createWriteStream(to, { flags: 'a' })
-  for (const name of ['init.mp4', ...track.segments.map((segment) => segment.name)]) {
-    await pipeline(createReadStream(join(working, track.folder, name)), out, { end: false })
+  async function* bytes() {
+    for (const name of ['init.mp4', ...track.segments.map((segment) => segment.name)]) {
+      yield* createReadStream(join(working, track.folder, name))
+    }
   }
-  await new Promise<void>((resolve, reject) => out.end((error?: Error | null) => (error ? reject(error) : resolve())))
+  await pipeline(bytes, createWriteStream(to))
+}
+
+/** ffmpeg moves a track with signed offsets back until nothing is negative; this moves it to where it belongs. Seconds. */
+async function minusStart(path: string): Promise<string> {
+  const { streams } = await probe(path)
+  return (-(streams[0]?.start_time ?? 0)).toFixed(6)
 }
 
 /**
@@ -55,7 +63,9 @@ export async function makePlain(working: string, video: Track, sound: Track | nu
   const inputs = tracks.map((track) => ({ track, path: join(parts, `${track.folder}.mp4`) }))
   for (const { track, path } of inputs) await joinSegments(working, track, path)
   await runFfmpeg({
-    inputs: inputs.map(({ path }) => ({ path })),
+    inputs: await Promise.all(
+      inputs.map(async ({ path }) => ({ path, options: ['-itsoffset', await minusStart(path)] })),
+    ),
     outputs: [
       {
         path: join(working, 'plain.mp4'),

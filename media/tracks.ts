@@ -15,6 +15,9 @@ function hlsOptions(folder: string, cutS: number): string[] {
   return [
     ...['-f', 'hls', '-hls_time', String(cutS), '-hls_playlist_type', 'vod', '-hls_segment_type', 'fmp4'],
     ...['-hls_fmp4_init_filename', 'init.mp4', '-hls_flags', 'independent_segments'],
+    // By default the picture begins two pictures late and an edit list says so, which browsers pass over when they are fed
+    // segments; sound would run ahead of it. Signed offsets let the first picture stand at zero without any list.
+    ...['-hls_segment_options', 'movflags=+negative_cts_offsets:use_editlist=0'],
     ...['-hls_segment_filename', join(folder, '%05d.m4s')],
   ]
 }
