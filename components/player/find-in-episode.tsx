@@ -19,7 +19,7 @@ export function FindInEpisode({ sentences, onGo }: FindInEpisodeProps) {
   const field = useId()
   const shown = places.slice(0, mostShown)
   return (
-    <search className="block border-b border-rule px-4 py-3 lg:px-5.5 print:hidden">
+    <div role="search" className="border-b border-rule px-4 py-3 lg:px-5.5 print:hidden">
       <label htmlFor={field} className="block text-sm font-semibold">
         Words said in this episode
       </label>
@@ -55,7 +55,7 @@ export function FindInEpisode({ sentences, onGo }: FindInEpisodeProps) {
           })}
         </ul>
       )}
-    </search>
+    </div>
   )
 }
 

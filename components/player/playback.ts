@@ -56,6 +56,7 @@ export class Playback {
     on('loadedmetadata', this.#goToWanted)
     for (const event of ['canplay', 'playing', 'seeked']) on(event, () => this.happened('can-play'))
     on('waiting', () => this.happened('ran-dry'))
+    if (media.readyState > 0) this.#meet(media)
     return () => {
       listening.abort()
       this.#media = null
@@ -117,6 +118,14 @@ export class Playback {
   keepPlace() {
     this.#wanted = this.#moment.at
     return this.#moment.at
+  }
+
+  /** A film that the browser opened before this script was there; one that plays already is where its viewer wants it. */
+  #meet(media: HTMLMediaElement) {
+    if (media.paused) return this.#goToWanted()
+    this.#wanted = null
+    this.#copyPlace()
+    this.#copyState()
   }
 
   #within(at: number) {
