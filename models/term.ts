@@ -3,8 +3,8 @@ import { db } from '@/lib/db'
 
 /** What a term is called somewhere: `{ place: 'UK', name: 'three-point linkage' }`. */
 export type RegionalName = { place: string; name: string }
-/** What tells this meaning apart: crops it belongs to, words that stand near it. */
-export type TermContext = { crops?: string[]; near?: string[]; notNear?: string[] }
+/** What tells this meaning apart: crops it belongs to, words that stand near it, words that come right before it. */
+export type TermContext = { crops?: string[]; near?: string[]; notNear?: string[]; after?: string[] }
 
 /** A glossary entry. */
 export class Term extends Model<InferAttributes<Term>, InferCreationAttributes<Term>> {

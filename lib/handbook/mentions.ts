@@ -22,15 +22,17 @@ function stretchesOf(cues: readonly Said[], chapters: readonly MarkedChapter[]):
       stretches.push({ crops: new Set(crops), words: [] })
       current += 1
     }
-    stretches.at(-1)?.words.push(...wordsOf(text).map((word) => ({ ...word, cue })))
+    // One by one: spread into one call, a very long cue overflows the stack.
+    for (const word of wordsOf(text)) stretches.at(-1)?.words.push({ ...word, cue })
   })
   return stretches
 }
 
-/** Crop and neighbouring words both have to fit; a chapter that names no crop excludes none. */
-function fits({ term, near, notNear }: Meaning, { crops, words }: Stretch, from: number, to: number): boolean {
+/** All that an entry's context asks has to fit; a chapter that names no crop excludes none. */
+function fits({ term, near, notNear, after }: Meaning, { crops, words }: Stretch, from: number, to: number): boolean {
   const wanted = term.context?.crops
   if (wanted && crops.size > 0 && !wanted.some((crop) => crops.has(crop))) return false
+  if (after.size > 0 && !after.has(words[from - 1]?.word ?? '')) return false
   let isNear = near.size === 0
   for (let i = Math.max(0, from - neighbours); i < Math.min(words.length, to + neighbours + 1); i += 1) {
     const word = words[i]?.word

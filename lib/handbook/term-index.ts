@@ -1,7 +1,13 @@
 import type { TermForms } from './entries'
 
 /** One thing that a form can mean. `spelling` is set for abbreviations, which count only as written. */
-export type Meaning = { term: TermForms; near: Set<string>; notNear: Set<string>; spelling: string | null }
+export type Meaning = {
+  term: TermForms
+  near: Set<string>
+  notNear: Set<string>
+  after: Set<string>
+  spelling: string | null
+}
 
 /** A step of the trie: the words that may follow, and what a form that ends here can mean. */
 export type FormNode = { next: Map<string, FormNode>; meanings: Meaning[] }
@@ -54,9 +60,10 @@ export function indexTerms(terms: readonly TermForms[]): FormNode {
   for (const term of particularFirst) {
     const near = new Set(term.context?.near?.map(fold))
     const notNear = new Set(term.context?.notNear?.map(fold))
+    const after = new Set(term.context?.after?.map(fold))
     for (const form of formsOf(term)) {
       const spelling = isAbbreviation(form.replace(/s$/, '')) ? form.normalize('NFC') : null
-      addForm(root, form, { term, near, notNear, spelling })
+      addForm(root, form, { term, near, notNear, after, spelling })
     }
   }
   return root
