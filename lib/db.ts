@@ -11,7 +11,8 @@ const shared = globalThis as unknown as { turnrowDatabase?: Sequelize; turnrowAm
 const ambient = (shared.turnrowAmbient ??= new AsyncLocalStorage<Map<string, unknown>>())
 
 // Inside `inTransaction` every query joins the transaction, also one that forgot to name it.
-Sequelize.useCLS({
+const joinAmbient = Sequelize.useCLS.bind(Sequelize)
+joinAmbient({
   get: (key: string) => ambient.getStore()?.get(key),
   set: (key: string, value: unknown) => ambient.getStore()?.set(key, value),
   run: (work: (context: unknown) => unknown) => {

@@ -1,5 +1,5 @@
 import { Meilisearch } from 'meilisearch'
-import { diskStorage } from '@/media/storage'
+import { diskStorage } from '@/media/disk'
 import { env } from './env'
 
 const build = () => ({

@@ -141,6 +141,7 @@ export const up: Migration = async ({ context: { run } }) => {
       start_ms integer not null check (start_ms >= 0),
       end_ms integer not null,
       text text not null,
+      plain text not null,
       speaker text,
       settings text,
       check (end_ms > start_ms)

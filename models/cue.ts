@@ -7,7 +7,10 @@ export class Cue extends Model<InferAttributes<Cue>, InferCreationAttributes<Cue
   declare trackId: string
   declare startMs: number
   declare endMs: number
+  /** WebVTT cue text: escaped, with the few tags that are kept. */
   declare text: string
+  /** The same words without markup: what is read aloud, searched and underlined. */
+  declare plain: string
   declare speaker: CreationOptional<string | null>
   declare settings: CreationOptional<string | null>
 }
@@ -19,6 +22,7 @@ Cue.init(
     startMs: { type: DataTypes.INTEGER, allowNull: false },
     endMs: { type: DataTypes.INTEGER, allowNull: false },
     text: { type: DataTypes.TEXT, allowNull: false },
+    plain: { type: DataTypes.TEXT, allowNull: false },
     speaker: { type: DataTypes.TEXT, allowNull: true },
     settings: { type: DataTypes.TEXT, allowNull: true },
   },

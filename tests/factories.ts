@@ -33,9 +33,10 @@ export async function makeMember(channel: Channel, role: Role): Promise<User> {
 export const makeEpisode = (channel: Channel, given: Partial<Episode['_creationAttributes']> = {}) =>
   Episode.create({
     channelId: channel.id,
-    number: next(),
-    slug: `episode-${count}`,
-    title: `Episode ${count}`,
+    // Far from the numbers that createEpisode gives out by itself.
+    number: 1000 + next(),
+    slug: `made-${count}`,
+    title: `Made ${count}`,
     ...(given.state === 'published' ? { publishedAt: new Date() } : {}),
     ...given,
   })
@@ -67,7 +68,7 @@ export async function makeChapter(episode: Episode, startMs: number, title: stri
 /** Captions from `[start ms, end ms, text]`. */
 export async function makeCaptions(episode: Episode, cues: [number, number, string][], language = 'en') {
   const track = await CaptionTrack.create({ episodeId: episode.id, language, label: 'English' })
-  await Cue.bulkCreate(cues.map(([startMs, endMs, text]) => ({ trackId: track.id, startMs, endMs, text })))
+  await Cue.bulkCreate(cues.map(([startMs, endMs, text]) => ({ trackId: track.id, startMs, endMs, text, plain: text })))
   return track
 }
 

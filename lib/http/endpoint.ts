@@ -5,7 +5,7 @@ import { signInNeeded } from '@/lib/errors'
 import { log } from '@/lib/log'
 import { Answer } from './answers'
 import { answeredOnce } from './idempotency'
-import { parseEdition, parseJson, parseParams, parseQuery } from './parse'
+import { ANY_EDITION, parseEdition, parseJson, parseParams, parseQuery } from './parse'
 import { problemResponse } from './problem-response'
 import { requestIdOf } from './request-id'
 import { refuseCrossSite } from './same-origin'
@@ -18,7 +18,7 @@ export type EndpointSpec<P, Q, I> = {
   input?: z.ZodType<I>
   output?: z.ZodType
   /** An edit: needs the ETag that was read, as If-Match. */
-  edition?: true
+  edition?: true | 'optional'
   /** A POST that makes something: honours Idempotency-Key and answers 201. */
   creates?: true
   /** Also for people who are not signed in, though it changes something. */
@@ -62,7 +62,7 @@ async function ask<P, Q, I>(spec: EndpointSpec<P, Q, I>, request: Request, conte
   }
   const params = spec.params ? parseParams(spec.params, await context.params) : (undefined as P)
   const query = spec.query ? parseQuery(spec.query, new URL(request.url)) : (undefined as Q)
-  const edition = spec.edition ? parseEdition(request) : -1
+  const edition = spec.edition ? parseEdition(request, spec.edition) : ANY_EDITION
   const input = spec.input && spec.body !== 'raw' ? await parseJson(spec.input, request) : (undefined as I)
   return { request, actor, params, query, input, edition, requestId } satisfies Asked<P, Q, I>
 }

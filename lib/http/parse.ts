@@ -62,11 +62,18 @@ function jsonOf(raw: string): unknown {
   }
 }
 
-/** The edition the caller read. @throws Problem 428 without If-Match, 400 when it is not one of our ETags */
-export function parseEdition(request: Request): number {
-  const given = request.headers.get('if-match')
-  if (given === null) throw editionNeeded()
-  const read = /^(?:W\/)?"?(\d+)"?$/.exec(given.trim())
-  if (!read) return -1
-  return Number(read[1])
+/** Matches whatever stands: `If-Match: *`, and a missing one where it is optional. */
+export const ANY_EDITION = -1
+/** Not one of our ETags; editions start at 1, so it never matches. */
+const NO_EDITION = 0
+
+/** The edition the caller read. @throws Problem 428 without If-Match, unless it is optional */
+export function parseEdition(request: Request, need: true | 'optional'): number {
+  const given = request.headers.get('if-match')?.trim()
+  if (given === undefined) {
+    if (need === 'optional') return ANY_EDITION
+    throw editionNeeded()
+  }
+  if (given === '*') return ANY_EDITION
+  return Number(/^"(\d+)"$/.exec(given)?.[1] ?? NO_EDITION)
 }

@@ -48,6 +48,15 @@ const sender = (): Promise<PgBoss> =>
     migrate: false,
   }).start())
 
+const found = new Set<string>()
+
+/** pg-boss drops a job for an unknown queue without a word; here that is an error. */
+async function refuseUnknown(queue: PgBoss, name: string): Promise<void> {
+  if (found.has(name)) return
+  if (!(await queue.getQueue(name))) throw new Error(`No queue is called ${name}: is it in lib/jobs/registry.ts?`)
+  found.add(name)
+}
+
 type When = { transaction: Transaction; key?: string; startAfter?: Date; priority?: number }
 
 /**
@@ -60,6 +69,7 @@ export async function enqueue<T>(
   { transaction, key, startAfter, priority }: When,
 ): Promise<void> {
   const queue = await sender()
+  await refuseUnknown(queue, job.name)
   await queue.send(job.name, job.data.parse(data) as object, {
     db: through(transaction),
     retryLimit: job.retryLimit,

@@ -1,4 +1,7 @@
+import { publishDue } from '@/lib/episodes/jobs'
+import { hearTerms } from '@/lib/handbook/jobs'
 import { sendLetter } from '@/lib/mail/jobs'
+import { refreshSearch } from '@/lib/search/jobs'
 import type { Job } from './queue'
 
 type Body<T> = (data: T) => Promise<unknown>
@@ -12,5 +15,8 @@ const on = <T>(job: Job<T>, load: () => Promise<Body<T>>, cron?: string): Regist
 
 /** Every kind of job and the body that does it. Bodies are loaded when the first such job arrives, and only in the worker. */
 export const registry: readonly Registered[] = [
+  on(publishDue, async () => (await import('@/lib/episodes/publish-due')).publishWhatIsDue, '* * * * *'),
+  on(hearTerms, async () => (await import('@/lib/handbook/hear-terms')).hearTermsInEpisode),
+  on(refreshSearch, async () => (await import('@/lib/search/refresh-search')).refreshSearchOf),
   on(sendLetter, async () => (await import('@/lib/mail/send-letter')).sendLetterById),
 ]

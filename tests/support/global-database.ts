@@ -22,7 +22,7 @@ async function someCluster(): Promise<Cluster> {
   if (given) return { url: given, stop: () => undefined }
   const { startCluster } = await import('../../scripts/setup/postgres.mjs')
   const directory = mkdtempSync(path.join(tmpdir(), 'turnrow-service-'))
-  const [port] = await freePorts(1)
+  const [port = 0] = await freePorts(1)
   const cluster = await startCluster({ directory, port, durable: false })
   return {
     url: cluster.url,
