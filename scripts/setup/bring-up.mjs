@@ -6,15 +6,9 @@ import { prepareBuild, prepareDatabase, prepareDemo, prepareMachine, prepareSche
 import { serversFor } from './servers.mjs'
 import { loadEnvFile, settingsFrom } from './settings.mjs'
 import { firstSignal } from './signals.mjs'
+import { together } from './together.mjs'
 import { sentenceFor } from './trouble.mjs'
 import { welcome } from './welcome.mjs'
-
-/** Does pieces of work side by side; throws the first failure once all have come to their end. */
-async function together(...works) {
-  const ended = await Promise.allSettled(works.map((work) => work()))
-  const failed = ended.find(({ status }) => status === 'rejected')
-  if (failed) throw failed.reason
-}
 
 /** Prepares whatever is missing, then starts every server. `mode` is start or dev; dev builds nothing beforehand. */
 async function bringUp(house, settings, mode) {
