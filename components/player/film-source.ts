@@ -39,8 +39,8 @@ export class HlsFilmSource {
     video.addEventListener('error', this.#onVideoError)
   }
 
-  begin(at: number): Promise<void> {
-    this.#beginning ??= this.#begin(at)
+  begin(): Promise<void> {
+    this.#beginning ??= this.#begin()
     return this.#beginning
   }
 
@@ -66,15 +66,17 @@ export class HlsFilmSource {
     this.#drop()
   }
 
-  async #begin(at: number) {
+  async #begin() {
     this.told.happened('began')
     const [{ default: Library }, address] = await Promise.all([import('hls.js'), this.#address()])
     if (this.#gone) return
     this.#drop()
-    if (Library.isSupported()) return this.#useHls(Library, address, at)
+    // The place may have moved while the library came; and the browser may have opened the plain file meanwhile.
+    if (Library.isSupported()) return this.#useHls(Library, address, this.told.keepPlace())
     if (this.video.canPlayType('application/vnd.apple.mpegurl') === '') return this.#usePlain()
     this.#way = 'native'
     this.told.shows(null)
+    this.told.keepPlace()
     this.video.src = address
   }
 
@@ -114,6 +116,7 @@ export class HlsFilmSource {
     this.#drop()
     this.#way = 'plain'
     this.told.shows(null)
+    this.told.keepPlace()
     this.video.src = this.film.plain
   }
 
@@ -151,13 +154,14 @@ export class HlsFilmSource {
   }
 
   #reopen() {
-    this.#goOn((at) => this.#begin(at))
+    this.#goOn(() => this.#begin())
   }
 
   /** Changes the source and goes on where, and as, the film was. */
-  #goOn(change: (at: number) => Promise<void>) {
+  #goOn(change: () => Promise<void>) {
     const wasPlaying = !this.video.paused
-    this.#beginning = change(this.told.keepPlace()).then(async () => {
+    this.told.keepPlace()
+    this.#beginning = change().then(async () => {
       if (wasPlaying && !this.#gone) await this.video.play().catch(() => undefined)
     })
   }

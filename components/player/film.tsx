@@ -8,7 +8,7 @@ import { asChoice, pictureOptions, type FilmSize } from './picture-sizes'
 import { usePlayback } from './playback-context'
 import { placeAfterKey } from './player-keys'
 import { useFilm } from './use-film'
-import { useHydrated } from './use-hydrated'
+import { useHydrated } from '@/components/ui/use-hydrated'
 
 export type CaptionTrack = { language: string; label: string; url: string }
 
@@ -39,7 +39,7 @@ export function Film({ title, film, captions, openAt }: FilmProps) {
       <div className="relative min-h-0 flex-1">
         <video
           ref={video}
-          className="group-fullscreen/film:h-full group-fullscreen/film:max-h-none block aspect-video max-h-[80vh] w-full bg-loam object-contain -outline-offset-3"
+          className="group-fullscreen/film:h-full group-fullscreen/film:max-h-none block aspect-video max-h-[80vh] w-full bg-loam object-contain -outline-offset-3 max-lg:[@media(min-height:36em)]:max-h-[45vh]"
           aria-label={`Film: ${title}`}
           poster={film.poster ?? undefined}
           preload={openAt > 0 ? 'metadata' : 'none'}

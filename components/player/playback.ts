@@ -12,7 +12,7 @@ export type Moment = {
 }
 
 /** Whatever brings the bytes. `begin` may be called again and then does nothing. */
-export type FilmSource = { begin(at: number): Promise<void> }
+export type FilmSource = { begin(): Promise<void> }
 
 const playerEvents = ['play', 'pause', 'ended', 'ratechange', 'volumechange', 'durationchange'] as const
 
@@ -76,7 +76,7 @@ export class Playback {
 
   seek(at: number) {
     this.place(at)
-    void this.#source?.begin(this.#moment.at)
+    void this.#source?.begin()
     if (this.#media && this.#media.readyState > 0) this.#goToWanted()
   }
 
@@ -86,7 +86,7 @@ export class Playback {
 
   async play() {
     if (this.#moment.duration > 0 && this.#moment.at >= this.#moment.duration - 0.25) this.seek(0)
-    await this.#source?.begin(this.#moment.at)
+    await this.#source?.begin()
     // Refused when the browser wants another press first, or cut short by a pause: both show as paused.
     await this.#media?.play().catch(() => undefined)
   }

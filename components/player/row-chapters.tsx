@@ -10,8 +10,10 @@ import { timeCode } from '@/lib/times/rules'
 import { useMoment, usePlayback } from './playback-context'
 import type { RowChapter } from './row-rules'
 
-/** Below this many CSS px a title under its block would break inside words. */
-const narrowestTitle = 76
+/** About the width of a letter of a title, in CSS px; from memory, and titles that miss it only wrap. */
+const letterWidth = 7.4
+/** A title longer than this many lines stands taller than the row. */
+const mostLines = 3
 /** Below this the row shows the one chapter that plays. */
 const narrowestRow = 480
 
@@ -22,10 +24,16 @@ export function RowChapters({ chapters, width }: RowChaptersProps) {
   const duration = useMoment((moment) => moment.duration)
   const current = useMoment((moment) => chapterAt(chapters, moment.at))
   if (chapters.length === 0) return null
-  const fits = chapters.every(({ start, end }) => ((end - start) / duration) * width >= narrowestTitle)
+  const fits = chapters.every(({ start, end, title }) => fitsUnder(title, ((end - start) / duration) * width))
   if (width >= narrowestRow && fits)
     return <TitlesUnderBlocks chapters={chapters} current={current} duration={duration} />
   return <PlayingChapter chapters={chapters} current={current} />
+}
+
+/** Whether a title can stand under a block of this width without breaking inside a word. */
+function fitsUnder(title: string, width: number): boolean {
+  const longest = Math.max(...title.split(/\s+/).map((word) => word.length))
+  return longest * letterWidth <= width && title.length * letterWidth <= width * mostLines
 }
 
 type ChapterListProps = { chapters: RowChapter[]; current: number | null }

@@ -1,6 +1,6 @@
 'use client'
 
-import { useHydrated } from './use-hydrated'
+import { useHydrated } from '@/components/ui/use-hydrated'
 
 const word = 'min-h-11 text-sm text-ink-2 underline decoration-dotted underline-offset-4 hover:decoration-solid'
 

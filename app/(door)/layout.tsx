@@ -1,0 +1,14 @@
+import type { ReactNode } from 'react'
+import { Frame, Main } from '@/components/frame/frame'
+import { framePerson } from '@/components/frame/frame-person'
+import { currentActor } from '@/lib/auth/current'
+
+export default async function DoorLayout({ children }: { children: ReactNode }) {
+  return (
+    <Frame person={framePerson(await currentActor())}>
+      <Main>
+        <div className="page max-w-measure">{children}</div>
+      </Main>
+    </Frame>
+  )
+}
