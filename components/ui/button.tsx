@@ -6,13 +6,13 @@ import { classNames } from './class-names'
 export type ButtonVariant = 'primary' | 'line' | 'quiet'
 
 const shape =
-  'inline-flex min-h-11 items-center justify-center gap-2 px-4.5 py-2 text-center text-[1rem] leading-tight font-semibold no-underline hover:no-underline'
+  'inline-flex min-h-11 items-center justify-center gap-2 py-2 text-center text-[1rem] leading-tight font-semibold no-underline hover:no-underline'
 
 const ink: Record<ButtonVariant, string> = {
-  primary: 'border-[1.5px] border-act bg-act text-on-act hover:border-act-deep hover:bg-act-deep',
-  line: 'border-[1.5px] border-ink bg-transparent text-ink hover:bg-mist',
+  primary: 'border-[1.5px] border-act bg-act px-4.5 text-on-act hover:border-act-deep hover:bg-act-deep',
+  line: 'border-[1.5px] border-ink bg-transparent px-4.5 text-ink hover:bg-mist',
   quiet:
-    'border-[1.5px] border-transparent bg-transparent px-2 text-water underline hover:underline hover:decoration-2',
+    'border-[1.5px] border-transparent bg-transparent px-1 text-water underline hover:underline hover:decoration-2',
 }
 
 const resting =

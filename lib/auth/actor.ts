@@ -36,3 +36,6 @@ export const deskChannelIds = (actor: Actor): string[] =>
 
 export const isAdviserSomewhere = (actor: Actor): boolean =>
   isPerson(actor) && actor.memberships.some(({ role }) => role === 'adviser')
+
+/** The units this person reads in; nobody reads in US ones. */
+export const unitsOf = (actor: Actor): Units => (isPerson(actor) ? actor.units : 'us')

@@ -61,5 +61,6 @@ export const dayAndMonth = (day: Day, language = 'en') => written(day, { day: 'n
 export const fullDay = (day: Day, language = 'en') =>
   written(day, { day: 'numeric', month: 'long', year: 'numeric' }, language)
 
-/** `Mar`, for the head of a column. */
-export const shortMonth = (day: Day, language = 'en') => written(day, { month: 'short' }, language)
+/** `Mar`, for the head of a column; `Sep` in three letters like the others, which British English would give four. */
+export const shortMonth = (day: Day, language = 'en') =>
+  written(day, { month: 'short' }, language === 'en' ? 'en-US' : language)

@@ -12,7 +12,8 @@ export async function forPage<T>(read: Promise<T>, here?: string): Promise<T> {
     return await read
   } catch (failure) {
     if (!(failure instanceof Problem)) throw failure
-    if (failure.status === 404) notFound()
+    // A cursor or an id that is none of ours was never an address here.
+    if (failure.status === 404 || failure.status === 400) notFound()
     if (failure.status === 401) redirect(`/sign-in${here ? `?callbackUrl=${encodeURIComponent(here)}` : ''}`)
     throw failure
   }

@@ -4,6 +4,12 @@ import { stageKeys } from '@/lib/topics/stage-words'
 
 export const seasonYear = z.coerce.number().int().min(1900).max(2200)
 
+/** The year in a page's address; null when none is named, and for what is no year, so that an old link still opens. */
+export function yearAsked(value: string | string[] | undefined): number | null {
+  const read = seasonYear.safeParse(value)
+  return read.success ? read.data : null
+}
+
 export const stageWindowInput = z.object({
   stage: z.enum(stageKeys),
   startsOn: z.iso.date('Give a day as year, month and day'),

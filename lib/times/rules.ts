@@ -33,3 +33,11 @@ export function isoDuration(position: number): string {
   const { hours, minutes, seconds } = clockOf(position)
   return `PT${hours ? `${hours}H` : ''}${minutes ? `${minutes}M` : ''}${seconds || (!hours && !minutes) ? `${seconds}S` : ''}`
 }
+
+/** How long something lasts, as a list says it: `48 s`, from a minute and a half on `12 min`, from an hour `1 h 5 min`. */
+export function lengthWords(length: number): string {
+  if (length < 90) return `${Math.round(length)} s`
+  const minutes = Math.round(length / 60)
+  if (minutes < 60) return `${minutes} min`
+  return `${Math.floor(minutes / 60)} h${minutes % 60 ? ` ${minutes % 60} min` : ''}`
+}

@@ -75,6 +75,7 @@ describe('days of the year', () => {
 
 describe('a day in words', () => {
   it('is written day first, with the month in letters, since 3/4 means two things', () => {
+    expect(shortMonth('2026-09-01')).toBe('Sep')
     expect([dayAndMonth('2026-03-18'), fullDay('2026-03-18'), shortMonth('2026-03-18')]).toEqual([
       '18 March',
       '18 March 2026',

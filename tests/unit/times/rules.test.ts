@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { isoDuration, spokenTime, timeCode } from '@/lib/times/rules'
+import { isoDuration, lengthWords, spokenTime, timeCode } from '@/lib/times/rules'
 
 describe('a position in an episode', () => {
   it('stands as m:ss, from an hour on as h:mm:ss', () => {
@@ -24,5 +24,19 @@ describe('a position in an episode', () => {
 
   it('is an ISO 8601 duration for machines (ISO 8601-1:2019, 5.5.2.2)', () => {
     expect([0, 60, 192, 3600, 3661].map(isoDuration)).toEqual(['PT0S', 'PT1M', 'PT3M12S', 'PT1H', 'PT1H1M1S'])
+  })
+})
+
+describe('a length', () => {
+  it('is said with its unit, and never as 60 of the smaller one', () => {
+    expect([48.4, 89, 90, 724, 3599, 3600, 3900].map(lengthWords)).toEqual([
+      '48 s',
+      '89 s',
+      '2 min',
+      '12 min',
+      '1 h',
+      '1 h',
+      '1 h 5 min',
+    ])
   })
 })
