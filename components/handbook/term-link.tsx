@@ -4,7 +4,6 @@ import Link from 'next/link'
 import { Popover } from 'radix-ui'
 import { useId, useRef, useState, type MouseEvent, type ReactNode } from 'react'
 import type { TermNote } from '@/lib/handbook/views'
-import { termClass } from './term-class'
 import { TermSheet } from './term-sheet'
 
 const opensElsewhere = (event: MouseEvent) =>
@@ -35,7 +34,7 @@ export function TermLink({ note, children }: { note: TermNote; children: ReactNo
           ref={link}
           href={`/handbook/terms/${note.slug}`}
           prefetch={false}
-          className={termClass}
+          className="term"
           aria-haspopup="dialog"
           aria-expanded={open}
           onClick={toggle}

@@ -2,7 +2,6 @@ import Link from 'next/link'
 import { Fragment } from 'react'
 import { cutAtMentions } from '@/lib/handbook/rules'
 import type { Mention, TermNotes } from '@/lib/handbook/views'
-import { termClass } from './term-class'
 import { TermLink } from './term-link'
 
 type TermTextProps = {
@@ -26,7 +25,7 @@ export function TermText({ text, terms, notes }: TermTextProps) {
       )
     }
     return (
-      <Link key={piece.from} href={`/handbook/terms/${piece.slug}`} prefetch={false} className={termClass}>
+      <Link key={piece.from} href={`/handbook/terms/${piece.slug}`} prefetch={false} className="term">
         {piece.text}
       </Link>
     )

@@ -2,7 +2,7 @@ import type { TermForms } from './entries'
 import { indexTerms, wordsOf, type FormNode, type Meaning, type Word } from './term-index'
 import type { Mention } from './views'
 
-type Said = { start: number; text: string }
+type Said = { start: number; end: number; text: string }
 /** A chapter as far as marking needs it; `EpisodeView.chapters` fit as they are. */
 type MarkedChapter = { start: number; topics: readonly { crop: string | null }[] }
 
@@ -12,12 +12,12 @@ type Stretch = { crops: Set<string>; words: (Word & { cue: number })[] }
 /** How far around a mention its neighbours are looked at. */
 const neighbours = 12
 
-/** Cues and chapters in order of time. A cue belongs to the chapter in which it starts. */
+/** Cues and chapters in order of time. As in the running text, the middle of a cue says whose it is. */
 function stretchesOf(cues: readonly Said[], chapters: readonly MarkedChapter[]): Stretch[] {
   const stretches: Stretch[] = [{ crops: new Set(), words: [] }]
   let current = 0
-  cues.forEach(({ start, text }, cue) => {
-    for (let next = chapters[current]; next && next.start <= start; next = chapters[current]) {
+  cues.forEach(({ start, end, text }, cue) => {
+    for (let next = chapters[current]; next && next.start <= (start + end) / 2; next = chapters[current]) {
       const crops = next.topics.flatMap(({ crop }) => crop ?? [])
       stretches.push({ crops: new Set(crops), words: [] })
       current += 1
@@ -61,9 +61,9 @@ function longestAt(root: FormNode, stretch: Stretch, cues: readonly Said[], firs
     if (i > first && before && !joins(text.slice(before.to, word.from))) return found
     node = node.next.get(word.word)
     if (!node) return found
-    const written = text.slice(begin.from, word.to).normalize('NFC')
+    const isWritten = (spelling: string) => spelling === text.slice(begin.from, word.to).normalize('NFC')
     const meaning = node.meanings.find(
-      (each) => (each.spelling === null || each.spelling === written) && fits(each, stretch, first, i),
+      (each) => (each.spelling === null || isWritten(each.spelling)) && fits(each, stretch, first, i),
     )
     if (meaning) found = { meaning, last: i }
   }

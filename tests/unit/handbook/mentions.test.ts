@@ -4,7 +4,7 @@ import { markTerms } from '@/lib/handbook/rules'
 
 /** Marks one sentence said in a chapter on `crop`, and gives back what was marked as "words → slug". */
 function marked(text: string, crop: string | null = null): string[] {
-  const [mentions = []] = markTerms([{ start: 0, text }], [{ start: 0, topics: [{ crop }] }], terms)
+  const [mentions = []] = markTerms([{ start: 0, end: 4, text }], [{ start: 0, topics: [{ crop }] }], terms)
   return mentions.map(({ from, to, slug }) => `${text.slice(from, to)} → ${slug}`)
 }
 
@@ -59,7 +59,7 @@ describe('a term in what is said', () => {
 
   it('keeps offsets right behind characters of two code units and combining accents', () => {
     const text = '🌾🌾 cafe\u0301 headland'
-    const [[mention] = []] = markTerms([{ start: 0, text }], [], terms)
+    const [[mention] = []] = markTerms([{ start: 0, end: 4, text }], [], terms)
     expect(mention && text.slice(mention.from, mention.to)).toBe('headland')
   })
 })
@@ -111,10 +111,10 @@ describe('meanings told apart', () => {
 
 describe('over chapters and cues', () => {
   const cues = [
-    { start: 1, text: 'The crown lives. The crown is white.' },
-    { start: 5, text: 'Another crown, at field' },
-    { start: 8, text: 'capacity. A crown.' },
-    { start: 12, text: 'Crown again.' },
+    { start: 1, end: 4, text: 'The crown lives. The crown is white.' },
+    { start: 5, end: 7, text: 'Another crown, at field' },
+    { start: 7.9, end: 11, text: 'capacity. A crown.' },
+    { start: 12, end: 13, text: 'Crown again.' },
   ]
   const chapters = [
     { start: 0, topics: [] },
@@ -138,8 +138,8 @@ describe('over chapters and cues', () => {
 
   it('reads the neighbouring cues of the chapter for what tells meanings apart, not those of another chapter', () => {
     const said = [
-      { start: 0, text: 'Water the terrace.' },
-      { start: 2, text: 'Each check holds it.' },
+      { start: 0, end: 2, text: 'Water the terrace.' },
+      { start: 2, end: 4, text: 'Each check holds it.' },
     ]
     expect(markTerms(said, [{ start: 0, topics: [{ crop: 'rice' }] }], terms)[1]).toHaveLength(1)
     const apart = [
@@ -154,9 +154,10 @@ describe('over chapters and cues', () => {
     expect(markTerms(cues, [], [])).toEqual([[], [], [], []])
   })
 
-  it('marks a long text without tiring: each mention lies on word boundaries and in order', () => {
-    const text = Array.from({ length: 20_000 }, () => 'field field capacity stand the stand boot').join(' ')
-    const [mentions = []] = markTerms([{ start: 0, text }], [], terms)
-    expect(mentions.map(({ slug }) => slug)).toEqual(['field-capacity', 'stand'])
+  it('reads a cue of a hundred and fifty thousand words to its end', () => {
+    // One long cue once overflowed the stack.
+    const text = `${'word '.repeat(150_000)}crown`
+    const [mentions = []] = markTerms([{ start: 0, end: 4, text }], [], terms)
+    expect(mentions).toEqual([{ from: text.length - 5, to: text.length, slug: 'crown' }])
   })
 })
