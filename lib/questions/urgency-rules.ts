@@ -1,45 +1,53 @@
+import { dayNumber, dayOf, type Day } from '@/lib/dates/rules'
 import type { Crop } from '@/lib/topics/crops'
 import type { StageKey } from '@/lib/topics/stage-words'
 
-const DAY_MS = 86_400_000
-
-/** From when to when a crop stands in a stage somewhere on the channel; days as yyyy-mm-dd, both included. */
-export type SeasonWindow = { crop: Crop; stage: StageKey; startsOn: string; endsOn: string }
+/** From when to when a crop stands in a stage somewhere on the channel; both days included. */
+export type SeasonWindow = { crop: Crop; stage: StageKey; startsOn: Day; endsOn: Day }
 
 /**
  * How long an answer is still of use.
  * `now`: the stage is there, `days` until its last day. `ahead`: it begins later this season. `over`: it has passed,
  * and comes again about a year later. `unknown`: no stage was given, or the channel has set no dates for it.
  */
-export type Useful = { kind: 'now' | 'ahead' | 'over'; days: number; until: string } | { kind: 'unknown' }
+export type Useful = { kind: 'now' | 'ahead' | 'over'; days: number; until: Day } | { kind: 'unknown' }
 
-const dayNumber = (day: string) => Math.round(Date.parse(`${day}T00:00:00Z`) / DAY_MS)
-const dayOf = (number: number) => new Date(number * DAY_MS).toISOString().slice(0, 10)
+const byStart = (a: SeasonWindow, b: SeasonWindow) => a.startsOn.localeCompare(b.startsOn)
 
-/** The calendar day in a time zone, yyyy-mm-dd. */
-export const dayIn = (timeZone: string, at: Date): string =>
-  new Intl.DateTimeFormat('en-CA', { timeZone, year: 'numeric', month: '2-digit', day: '2-digit' }).format(at)
+/** The last day of the run of windows that overlap one another from the first on: fields of one season, not of the next. */
+const endOfRun = (ordered: readonly SeasonWindow[]): Day =>
+  ordered.reduce(
+    (end, { startsOn, endsOn }) => (startsOn <= end && endsOn > end ? endsOn : end),
+    ordered[0]?.endsOn ?? '',
+  )
 
 /**
  * How long an answer about this stage is of use on this channel. Of several fields the one that lasts longest counts:
  * the answer is late only when it is late for all of them.
- * @param today yyyy-mm-dd in the channel's time zone
+ * @param today in the channel's time zone
  */
 export function usefulUntil(
   asked: { crop: Crop | null; stage: StageKey | null },
   windows: readonly SeasonWindow[],
-  today: string,
+  today: Day,
 ): Useful {
-  const fitting = windows.filter(({ crop, stage }) => stage === asked.stage && (!asked.crop || crop === asked.crop))
-  const latest = fitting.toSorted((a, b) => b.endsOn.localeCompare(a.endsOn))[0]
-  if (!latest) return { kind: 'unknown' }
-  if (latest.endsOn >= today) {
-    const days = dayNumber(latest.endsOn) - dayNumber(today)
-    const begun = fitting.some(({ startsOn, endsOn }) => startsOn <= today && endsOn >= today)
-    return { kind: begun ? 'now' : 'ahead', days, until: latest.endsOn }
+  const fitting = windows
+    .filter(({ crop, stage }) => stage === asked.stage && (!asked.crop || crop === asked.crop))
+    .toSorted(byStart)
+  const coming = fitting.filter(({ endsOn }) => endsOn >= today)
+  const [next] = coming
+  if (next) {
+    const until = endOfRun(coming)
+    return { kind: next.startsOn <= today ? 'now' : 'ahead', days: dayNumber(until) - dayNumber(today), until }
   }
-  const missed = dayNumber(today) - dayNumber(latest.endsOn)
-  const again = dayNumber(latest.endsOn) + Math.ceil(missed / 365) * 365
+  const last = fitting.reduce<Day | null>((end, { endsOn }) => (end && end > endsOn ? end : endsOn), null)
+  return last ? yearsOn(last, today) : { kind: 'unknown' }
+}
+
+/** A stage that is over comes again about a year later. */
+function yearsOn(last: Day, today: Day): Useful {
+  const missed = dayNumber(today) - dayNumber(last)
+  const again = dayNumber(last) + Math.ceil(missed / 365) * 365
   return { kind: 'over', days: again - dayNumber(today), until: dayOf(again) }
 }
 
@@ -64,7 +72,7 @@ export function urgencyOf(asked: { daysLeft: number | null; asking: number; wait
 export const urgencyExplained =
   'People asking plus weeks waited (at most 8), times haste: 3 on the last day of the stage, 2 a week before it, hardly more than 1 for next season.'
 
-const monthOf = (day: string) =>
+const monthOf = (day: Day) =>
   new Intl.DateTimeFormat('en', { month: 'long', timeZone: 'UTC' }).format(new Date(`${day}T00:00:00Z`))
 
 /** Up to here days are counted; after it the month says more. */

@@ -1,6 +1,5 @@
 import { describe, expect, it } from 'vitest'
 import {
-  dayIn,
   urgencyOf,
   usefulSentence,
   usefulUntil,
@@ -30,6 +29,15 @@ describe('how long an answer is of use', () => {
     expect(at('2026-06-01').kind).toBe('now')
   })
 
+  it('keeps to this season while the next one is already set', () => {
+    const both = [...windows, { crop: 'soybean', stage: '2', startsOn: '2027-06-01', endsOn: '2027-06-20' } as const]
+    expect(usefulUntil({ crop: 'soybean', stage: '2' }, both, '2026-06-24')).toMatchObject({ until: '2026-06-28' })
+    expect(usefulUntil({ crop: 'soybean', stage: '2' }, both, '2026-07-01')).toMatchObject({
+      kind: 'ahead',
+      until: '2027-06-20',
+    })
+  })
+
   it('comes again a year later once the stage is over', () => {
     expect(at('2026-06-29')).toEqual({ kind: 'over', days: 364, until: '2027-06-28' })
     expect(at('2028-01-01')).toEqual({ kind: 'over', days: 178, until: '2028-06-27' })
@@ -43,12 +51,6 @@ describe('how long an answer is of use', () => {
   it('is unknown without a stage or without dates for it', () => {
     expect(usefulUntil({ crop: 'wheat', stage: null }, windows, '2026-06-24')).toEqual({ kind: 'unknown' })
     expect(usefulUntil({ crop: 'rice', stage: '2' }, windows, '2026-06-24')).toEqual({ kind: 'unknown' })
-  })
-
-  it('takes the day from the farm and not from the server', () => {
-    const lateEvening = new Date('2026-06-25T03:30:00Z')
-    expect(dayIn('America/Chicago', lateEvening)).toBe('2026-06-24')
-    expect(dayIn('Asia/Kolkata', lateEvening)).toBe('2026-06-25')
   })
 
   const said: [Useful, string, string][] = [
