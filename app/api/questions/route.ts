@@ -1,0 +1,18 @@
+import { created } from '@/lib/http/answers'
+import { endpoint } from '@/lib/http/endpoint'
+import { readQuestions } from '@/lib/questions/reads'
+import { askInput, questionOutput, questionPage, questionsQuery } from '@/lib/questions/schema'
+import { askQuestion } from '@/lib/questions/writes'
+
+export const GET = endpoint(
+  { summary: 'Questions, newest first or in the order of the queue', query: questionsQuery, output: questionPage },
+  ({ actor, query }) => readQuestions(actor, query),
+)
+
+export const POST = endpoint(
+  { summary: 'Ask a question', input: askInput, output: questionOutput, creates: true },
+  async ({ actor, input }) => {
+    const question = await askQuestion(actor, input)
+    return created(question, { location: `/api/questions/${question.id}`, edition: question.edition })
+  },
+)
