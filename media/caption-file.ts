@@ -9,9 +9,18 @@ export function decodeText(bytes: Uint8Array): string {
   try {
     return new TextDecoder('utf-8', { fatal: true }).decode(bytes)
   } catch {
-    return new TextDecoder('windows-1252').decode(bytes)
+    return decodeWindows1252(bytes)
   }
 }
+
+/** What windows-1252 puts where Latin-1 has control characters, 0x80 to 0x9F (WHATWG Encoding, index windows-1252). */
+const windows1252 = '€\x81‚ƒ„…†‡ˆ‰Š‹Œ\x8dŽ\x8f\x90‘’“”•–—˜™š›œ\x9džŸ'
+
+/** By hand, because Node 20's own decoder reads these as control characters (seen). */
+const decodeWindows1252 = (bytes: Uint8Array): string =>
+  Buffer.from(bytes)
+    .toString('latin1')
+    .replace(/[\x80-\x9f]/g, (letter) => windows1252[letter.charCodeAt(0) - 0x80] ?? letter)
 
 /** Reads a caption file as WebVTT or SubRip, told apart by what is in it and only then by its name. */
 export function readCaptionFile(bytes: Uint8Array, filename: string): ReadCaptions {

@@ -2,8 +2,7 @@ import { randomBytes } from 'node:crypto'
 import { createReadStream } from 'node:fs'
 import { link, mkdir, open, readdir, rm, stat, unlink } from 'node:fs/promises'
 import { dirname, join, resolve, sep } from 'node:path'
-import { Readable } from 'node:stream'
-import { pipeline } from 'node:stream/promises'
+import type { Readable } from 'node:stream'
 import { sync } from './files'
 import { NameTaken, safeName, type Storage, type Stored } from './storage'
 
@@ -51,8 +50,9 @@ async function put(name: string, path: string, bytes: Readable | Uint8Array): Pr
   try {
     const file = await open(unfinished, 'wx')
     try {
-      if (bytes instanceof Readable) await pipeline(bytes, file.createWriteStream({ autoClose: false, flush: true }))
-      else await file.writeFile(bytes)
+      // On a file handle this goes on from where the last one ended.
+      if (bytes instanceof Uint8Array) await file.writeFile(bytes)
+      else for await (const chunk of bytes) await file.writeFile(chunk as Buffer)
       await file.sync()
     } finally {
       await file.close()

@@ -12,6 +12,16 @@ type Tag = TreeNodeObject<TreeNodeObjectTagNameWithRt>
 
 export const captionLimits = { bytes: 5_000_000, cues: 20_000, tagsPerCue: 200, lineLength: 5_000 } as const
 
+/** With the semicolon: the parser's own table is without, and leaves it standing in the text (`&lt;` became `<;`). */
+const entities = {
+  '&amp;': '&',
+  '&lt;': '<',
+  '&gt;': '>',
+  '&lrm;': '\u200e',
+  '&rlm;': '\u200f',
+  '&nbsp;': '\u00a0',
+} as const
+
 /** Faults that cost neither words nor times; the cue is read as the standard's parser reads it and written back clean. */
 const harmless = [
   'No blank line after the signature.',
@@ -57,7 +67,7 @@ export function readWebVtt(source: string): ReadCaptions {
   const tooMuch = overLimits(lines)
   if (tooMuch) return { cues: [], errors: [tooMuch], notes: [] }
   const readable = withoutRegions(lines)
-  const parsed = new WebVTTParser().parse(readable.join('\n'), 'subtitles')
+  const parsed = new WebVTTParser(entities).parse(readable.join('\n'), 'subtitles')
   const found = parsed.errors.map((error) => ({ line: lineOf(error, readable), message: error.message }))
   const errors = found.filter(({ message }) => !isHarmless(message))
   const cues = parsed.cues.map(cueOf)
@@ -102,6 +112,8 @@ function withoutRegions(lines: string[]): string[] {
 
 /** Faults in cue text are reported at the line after the cue, with a column into its text; this finds the line meant. */
 function lineOf(error: { message: string; line: number; col?: number }, lines: string[]): number {
+  // Said of a line once the next one has been looked at.
+  if (error.message.startsWith('Cue identifier')) return error.line - 1
   if (!isTextFault(error.message)) return Math.min(error.line, lines.length)
   const last = error.line - 1
   let first = last
