@@ -1,11 +1,6 @@
 import { QueryTypes } from 'sequelize'
 import { db, inTransaction } from '@/lib/db'
-import {
-  documentsOfEpisodes,
-  documentsOfExplainers,
-  documentsOfQuestions,
-  documentsOfTerms,
-} from './document-reads'
+import { documentsOfEpisodes, documentsOfExplainers, documentsOfQuestions, documentsOfTerms } from './document-reads'
 import { lockIndex } from './index-lock'
 import { rebuildSearch } from './rebuild-search'
 import { indexIsThere, replaceDocuments } from './search-index'
