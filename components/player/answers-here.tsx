@@ -17,8 +17,8 @@ export function AnswersHere({ answers }: { answers: AnswerHere[] }) {
       <h2 id="answers-here">This episode answers</h2>
       <ul className="sheet ruled mt-3">
         {answers.map(({ question, start, text }) => (
-          <li key={question.id} className="grid grid-cols-[1.5rem_minmax(0,1fr)] gap-x-3 px-4.5 py-4">
-            <PinMark kind="answered" />
+          <li key={question.id} className="grid grid-cols-[auto_minmax(0,1fr)] gap-x-1.5 px-4.5 py-4">
+            <PinMark kind="answered" className="-ml-2" />
             <div className="max-w-measure">
               <Link href={question.url} className="font-semibold text-ink no-underline hover:underline">
                 {question.title}

@@ -56,7 +56,7 @@ export class Playback {
     on('loadedmetadata', this.#goToWanted)
     for (const event of ['canplay', 'playing', 'seeked']) on(event, () => this.happened('can-play'))
     on('waiting', () => this.happened('ran-dry'))
-    if (media.readyState > 0) this.#meet(media)
+    this.#meet(media)
     return () => {
       listening.abort()
       this.#media = null
@@ -77,7 +77,7 @@ export class Playback {
   seek(at: number) {
     this.place(at)
     void this.#source?.begin()
-    if (this.#media && this.#media.readyState > 0) this.#goToWanted()
+    this.#goToWanted()
   }
 
   step(seconds: number) {
@@ -132,14 +132,17 @@ export class Playback {
     return Math.min(Math.max(0, at), this.#moment.duration || Infinity)
   }
 
+  // Events of the source before still arrive when the next is being opened; an element without metadata is at no place.
   #goToWanted = () => {
-    if (this.#media && this.#wanted !== null) this.#media.currentTime = this.#wanted
+    if (!this.#media || this.#media.readyState === 0) return
+    if (this.#wanted !== null) this.#media.currentTime = this.#wanted
     this.#wanted = null
   }
 
   #copyPlace = () => {
+    if (!this.#media || this.#media.readyState === 0) return
     // A source that is just opening reports 0 until it has been sent to the wanted place.
-    if (this.#media && this.#wanted === null) this.#change({ at: this.#media.currentTime })
+    if (this.#wanted === null) this.#change({ at: this.#media.currentTime })
   }
 
   #copyState = () => {

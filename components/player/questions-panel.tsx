@@ -34,8 +34,8 @@ function QuestionList({ questions }: { questions: RowQuestion[] }) {
   return (
     <ul className="grid gap-3">
       {questions.map((question) => (
-        <li key={question.id} className="grid grid-cols-[1.5rem_minmax(0,1fr)] gap-x-2.5">
-          <PinMark kind={question.followUp ? 'answered' : 'waiting'} />
+        <li key={question.id} className="grid grid-cols-[auto_minmax(0,1fr)] gap-x-1.5">
+          <PinMark kind={question.followUp ? 'answered' : 'waiting'} className="-ml-2.5" />
           <div>
             <Link href={question.url} className="text-ink no-underline hover:underline">
               {question.title}

@@ -50,8 +50,8 @@ export function ReadingsPanel({ readings, chapters }: ReadingsPanelProps) {
 
 function LargeReading({ reading }: { reading: RowReading }) {
   return (
-    <div className="flex items-start gap-2">
-      <PinMark kind="reading" className="mt-0.5" />
+    <div className="flex items-start gap-1">
+      <PinMark kind="reading" className="mt-0.5 -ml-2" />
       <div className="grid min-w-0 grid-cols-[auto_minmax(0,1fr)] items-baseline gap-x-3.5">
         <span className="font-display text-[1.6875rem] leading-none font-semibold whitespace-nowrap">
           {figureOf(reading)}

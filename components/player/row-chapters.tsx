@@ -52,7 +52,7 @@ function TitlesUnderBlocks({ chapters, current, duration }: ChapterListProps & {
             aria-current={at === current ? 'true' : undefined}
             onClick={() => playback.seek(chapter.start)}
             className={classNames(
-              'min-h-6 w-full pr-1.5 text-left leading-tight hover:underline',
+              'flex min-h-6 w-full items-start pr-1.5 text-left leading-tight hover:underline',
               at === current && 'font-semibold text-ink',
             )}
           >

@@ -43,7 +43,13 @@ export function useFilm({ hls, plain }: { hls: string; plain: string }, { choice
   useEffect(() => source.current?.choose(choice), [choice])
 
   useEffect(() => {
-    if (video.current) showCaptions(video.current.textTracks, language)
+    const tracks = video.current?.textTracks
+    if (!tracks) return
+    // Chromium turns a second language on by itself after the tracks are there (seen with version 156).
+    const show = () => showCaptions(tracks, language)
+    show()
+    tracks.addEventListener('change', show)
+    return () => tracks.removeEventListener('change', show)
   }, [language])
 
   useEffect(() => {
@@ -61,5 +67,9 @@ export function useFilm({ hls, plain }: { hls: string; plain: string }, { choice
 }
 
 function showCaptions(tracks: TextTrackList, language: string) {
-  for (const track of tracks) track.mode = track.language === language ? 'showing' : 'disabled'
+  for (const track of tracks) {
+    const mode = track.language === language ? 'showing' : 'disabled'
+    // Setting a mode, even to what it is, raises the event that leads here.
+    if (track.mode !== mode) track.mode = mode
+  }
 }
