@@ -1,0 +1,106 @@
+import { spawn } from 'node:child_process'
+import { createHash } from 'node:crypto'
+import { access, rename, rm } from 'node:fs/promises'
+import { basename, join } from 'node:path'
+import sharp from 'sharp'
+import type { CutSheet } from './cut-sheet'
+import { height, picture, width, type Clock } from './scenes/brush'
+import { scenes } from './scenes/scenes'
+import type { StoryEpisode } from './story/types'
+import type { Voiced } from './voice-lines'
+
+/** Frames a second: enough for drawn pictures, and a quarter of the cost of twenty. */
+const rate = 5
+
+/** The pictures of a film as SVG, one per drawn frame; many are equal, and equal ones are rendered once. */
+export function framesOf(episode: StoryEpisode, sheet: CutSheet): string[] {
+  const count = Math.ceil((sheet.durationMs / 1000) * rate)
+  return Array.from({ length: count }, (_, index) => frameAt(episode, sheet, (index * 1000) / rate))
+}
+
+/** The picture at a moment, milliseconds. */
+export function frameAt(episode: StoryEpisode, sheet: CutSheet, ms: number): string {
+  const index = Math.max(
+    0,
+    sheet.chapters.findLastIndex((chapter) => chapter.startMs <= ms),
+  )
+  const chapter = sheet.chapters[index]
+  const scene = scenes[episode.chapters[index]?.scene ?? '']
+  if (!chapter || !scene) throw new Error(`${episode.key} has no picture at ${ms} ms`)
+  const said = sheet.cues.filter((cue) => cue.chapter === index)
+  const line = Math.max(
+    0,
+    said.findLastIndex((cue) => cue.startMs <= ms),
+  )
+  const clock: Clock = {
+    t: (ms - chapter.startMs) / 1000,
+    of: (chapter.endMs - chapter.startMs) / 1000,
+    line,
+    since: Math.max(0, (ms - (said[line]?.startMs ?? 0)) / 1000),
+  }
+  return picture(scene(clock))
+}
+
+/**
+ * Draws a film to `folder` and returns its path: flat pictures and the voice, H.264 and AAC. Named after everything that
+ * is in it, so that a film already drawn is found and a changed one is drawn anew.
+ */
+export async function drawFilm(episode: StoryEpisode, voiced: Voiced, folder: string): Promise<string> {
+  const frames = framesOf(episode, voiced.sheet)
+  const hash = createHash('sha256').update(basename(voiced.sound)).update(frames.join('')).digest('hex').slice(0, 12)
+  const film = join(folder, `${episode.key}-${hash}.mp4`)
+  if (
+    await access(film).then(
+      () => true,
+      () => false,
+    )
+  )
+    return film
+
+  const part = join(folder, `${episode.key}-${hash}.part.mp4`)
+  const encoder = spawn('ffmpeg', encoderArguments(voiced.sound, part), { stdio: ['pipe', 'ignore', 'pipe'] })
+  const said: Buffer[] = []
+  encoder.stderr.on('data', (chunk: Buffer) => said.push(chunk))
+  const ended = new Promise<number | null>((resolve, reject) => encoder.once('error', reject).once('close', resolve))
+  // A broken pipe shows as the exit code below; without a listener it would end the process.
+  encoder.stdin.on('error', () => undefined)
+  for await (const pixels of rendered(frames)) {
+    if (!encoder.stdin.write(pixels))
+      await Promise.race([new Promise((resolve) => encoder.stdin.once('drain', resolve)), ended])
+  }
+  encoder.stdin.end()
+  if ((await ended) !== 0) {
+    await rm(part, { force: true })
+    throw new Error(`drawing ${episode.key} failed: ${Buffer.concat(said).toString('utf8').slice(-600)}`)
+  }
+  await rename(part, film)
+  return film
+}
+
+async function* rendered(frames: string[]): AsyncGenerator<Buffer> {
+  const kept = new Map<string, Buffer>()
+  for (const svg of frames) {
+    const pixels =
+      kept.get(svg) ?? (await sharp(Buffer.from(svg), { sequentialRead: true }).removeAlpha().raw().toBuffer())
+    kept.delete(svg)
+    kept.set(svg, pixels)
+    // 24 frames are nearly five seconds, longer than any loop, and 66 MB.
+    if (kept.size > 24) kept.delete(kept.keys().next().value ?? '')
+    yield pixels
+  }
+}
+
+function encoderArguments(sound: string, film: string): string[] {
+  return [
+    ...['-v', 'error', '-nostdin', '-y'],
+    ...['-f', 'rawvideo', '-pix_fmt', 'rgb24', '-s', `${width}x${height}`, '-framerate', String(rate), '-i', 'pipe:0'],
+    ...['-i', sound],
+    // Flat pictures need no fine motion search; a key frame every four seconds.
+    ...['-c:v', 'libx264', '-preset', 'veryfast', '-crf', '25', '-x264-params', 'me=dia:subme=1'],
+    ...['-g', String(rate * 4), '-pix_fmt', 'yuv420p'],
+    ...['-c:a', 'aac', '-b:a', '64k', '-ar', '48000', '-ac', '1'],
+    // Bit-exact, without dates and on one thread, so that the same story gives the same file.
+    ...['-threads', '1', '-map_metadata', '-1', '-fflags', '+bitexact', '-flags', '+bitexact'],
+    ...['-movflags', '+faststart', film],
+  ]
+}
