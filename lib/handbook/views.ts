@@ -70,7 +70,6 @@ export type ExplainerView = ExplainerLine & {
   caution: string | null
   checkedOn: string | null
   claims: ClaimView[]
-  sources: number
   bibliography: SourceView[]
   terms: { slug: string; label: string; url: string }[]
 }

@@ -1,7 +1,9 @@
 import { QueryTypes } from 'sequelize'
 import { db } from '@/lib/db'
+import { cutPage, decodeCursor, type Page } from '@/lib/http/paging'
 import { crops, type Crop } from './crops'
-import { topicByCode } from './rules'
+import { type Topic, topicByCode, topics } from './rules'
+import type { TopicsQuery } from './schema'
 import { stageKeys, type StageKey } from './stage-words'
 
 export type FiledStages = { crop: Crop; stages: StageKey[] }
@@ -20,4 +22,17 @@ export async function filedStages(): Promise<FiledStages[]> {
     const stages = stageKeys.filter((stage) => own.has(stage))
     return stages.length === 0 ? [] : [{ crop, stages }]
   })
+}
+
+/** The vocabulary, or the part of it for one crop or of one kind. */
+export function listTopics({ crop, kind, cursor, limit = topics.length }: TopicsQuery): Page<Topic> {
+  const wanted = topics.filter((topic) => (!crop || topic.crop === crop) && (!kind || topic.kind === kind))
+  const last = cursor && decodeCursor(cursor, 1)[0]
+  const from = last ? wanted.findIndex(({ code }) => code === last) + 1 : 0
+  return cutPage(
+    wanted.slice(from, from + limit + 1),
+    limit,
+    (topic) => topic,
+    ({ code }) => [code],
+  )
 }

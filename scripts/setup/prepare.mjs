@@ -44,9 +44,12 @@ export async function prepareDatabase(house, settings, from) {
   return environmentFor(settings, from, url, secretsIn(settings.dataDir))
 }
 
-/** Migrations and queues; run on every start, for a restored database may be an older one. */
+/** Migrations, queues and the shipped handbook; run on every start, for a restored database may be an older one. */
 export const prepareSchema = (house, { root }, env) =>
-  house.step('Bringing the database up to date', (say) => runScript(root, env, 'scripts/migrate.ts', say))
+  house.step('Bringing the database up to date', async (say) => {
+    await runScript(root, env, 'scripts/migrate.ts', say)
+    await runScript(root, env, 'scripts/load-handbook.ts', say)
+  })
 
 /** The demo, once: the note is written last, so a seeding that was cut off is run again. */
 export async function prepareDemo(house, { root, dataDir, demo }, env) {
