@@ -12,7 +12,7 @@ import { newestEpisodes } from '@/lib/episodes/reads'
 import { readQuestions } from '@/lib/questions/reads'
 import { questionsQuery } from '@/lib/questions/schema'
 import { currentSeasons } from '@/lib/seasons/reads'
-import { filedStages } from '@/lib/topics/reads'
+import { filedStages } from '@/lib/topics/filed-reads'
 
 const open = questionsQuery.parse({ state: 'new,queued,booked', sort: 'urgency', limit: 5 })
 

@@ -1,11 +1,11 @@
 import Link from 'next/link'
 import { StageTag } from '@/components/ui/tag'
 import { stageCode } from '@/lib/seasons/rules'
-import { cropWord } from '@/lib/topics/crops'
-import type { FiledStages } from '@/lib/topics/reads'
+import { cropWord, type Crop } from '@/lib/topics/crops'
+import type { StageKey } from '@/lib/topics/stage-words'
 
 /** The way in for somebody who knows crop and stage but no farm: what there is, crop by crop. */
-export function StagesToFind({ filed }: { filed: FiledStages[] }) {
+export function StagesToFind({ filed }: { filed: { crop: Crop; stages: StageKey[] }[] }) {
   if (filed.length === 0) return null
   return (
     <section aria-labelledby="by-stage">

@@ -11,7 +11,16 @@ import type { Channel } from '@/models/channel'
 import { Episode } from '@/models/episode'
 import { Season } from '@/models/season'
 import { boardSpan, seasonToShow } from './rules'
-import { type FilmedEpisode, type FilmedRow, filmedEpisode, type SeasonRow, type SeasonView, seasonView } from './views'
+import {
+  type Board,
+  type DeskSeason,
+  type FilmedEpisode,
+  type FilmedRow,
+  filmedEpisode,
+  type SeasonRow,
+  type SeasonView,
+  seasonView,
+} from './views'
 
 const lanes = { association: 'plantings', include: [{ association: 'windows' }] }
 
@@ -38,14 +47,6 @@ export async function readSeason(slug: string, year: number): Promise<SeasonView
   const season = await seasonOf((await channelBySlug(slug)).id, year)
   if (!season) throw notFound('This season')
   return season
-}
-
-export type Board = {
-  channel: ChannelView
-  today: Day
-  years: number[]
-  season: SeasonView | null
-  episodes: FilmedEpisode[]
 }
 
 /**
@@ -108,14 +109,6 @@ export async function currentSeasons(channels: ChannelView[]): Promise<Map<strin
     return row ? [[id, seasonView(row as SeasonRow)] as const] : []
   })
   return new Map(seasons)
-}
-
-export type DeskSeason = {
-  channel: ChannelView
-  today: Day
-  years: number[]
-  season: SeasonView | null
-  mayEdit: boolean
 }
 
 /** The season as the desk edits it; advisers read it. @throws Problem 404 for people of other channels, 401 for nobody */

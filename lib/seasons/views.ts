@@ -1,3 +1,4 @@
+import type { ChannelView } from '@/lib/channels/views'
 import type { Day } from '@/lib/dates/rules'
 import { crops, type Crop } from '@/lib/topics/crops'
 import type { StageKey } from '@/lib/topics/stage-words'
@@ -32,6 +33,24 @@ export type FilmedEpisode = {
   filmedOn: Day
   /** The crop most of its chapters are filed under; null when it is about the whole farm. */
   crop: Crop | null
+}
+
+/** The front page of a channel. */
+export type Board = {
+  channel: ChannelView
+  today: Day
+  years: number[]
+  season: SeasonView | null
+  episodes: FilmedEpisode[]
+}
+
+/** A season at the desk: read by everybody there, edited by owner and editors. */
+export type DeskSeason = {
+  channel: ChannelView
+  today: Day
+  years: number[]
+  season: SeasonView | null
+  mayEdit: boolean
 }
 
 export type SeasonRow = Season & { plantings?: (Planting & { windows?: StageWindow[] })[] }
