@@ -33,11 +33,12 @@ export const startAsking = (actor: Actor, id: string): Promise<Standing> =>
     return made.length > 0
   })
 
-/** "Not any more": no letter comes. */
+/** "Not any more", also where it was asked in another question that is joined to this one: no letter comes. */
 export const stopAsking = (actor: Actor, id: string): Promise<Standing> =>
   changeAsking(actor, id, async (questionId, userId, transaction) => {
     const gone = await some(
-      'delete from askings where question_id = $1 and user_id = $2 returning question_id',
+      `delete from askings where user_id = $2 and (question_id = $1
+         or question_id in (select id from questions where joined_into = $1)) returning question_id`,
       [questionId, userId],
       transaction,
     )

@@ -3,13 +3,14 @@ import { type Actor, deskChannelIds } from '@/lib/auth/actor'
 import { channelBySlug } from '@/lib/channels/reads'
 import { db } from '@/lib/db'
 import type { QuestionState } from './rules'
+import { alikePassages } from './passage-reads'
 import { ASKING } from './row-reads'
 import type { SimilarQuery } from './schema'
 import { type LikenessView, questionUrl } from './views'
 
 /** Fewer letters than this look like everything. */
 const SHORTEST = 3
-/** Below this a likeness is chance. Common practice, no source; issue of the loop measures it on labelled pairs. */
+/** Below this a likeness is chance. Common practice, no source. */
 const LEAST = 0.2
 
 type Row = { id: string; title: string; state: QuestionState; asking: number; score: number }
@@ -64,5 +65,10 @@ export async function readAlike(
 ): Promise<{ items: LikenessView[]; nextCursor: null }> {
   const channelId = query.channel ? (await channelBySlug(query.channel)).id : null
   if (query.q.length < SHORTEST) return { items: [], nextCursor: null }
-  return { items: await alikeQuestions(actor, channelId, query), nextCursor: null }
+  const [questions, passages] = await Promise.all([
+    alikeQuestions(actor, channelId, query),
+    alikePassages(actor, query.q, query.channel),
+  ])
+  const items = [...questions, ...passages].sort((a, b) => b.score - a.score).slice(0, query.limit)
+  return { items, nextCursor: null }
 }

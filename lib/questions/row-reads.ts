@@ -3,9 +3,11 @@ import type { Actor } from '@/lib/auth/actor'
 import { db } from '@/lib/db'
 import type { QuestionRow } from './row'
 
+/** SQL: the questions that go together with `q`: itself and those joined to it. */
+const TOGETHER = `(s.question_id = q.id or s.question_id in (select j.id from questions j where j.joined_into = q.id))`
+
 /** SQL: how many different people want question `q` answered, those who ask one joined to it included. */
-export const ASKING = `(select count(distinct s.user_id)::int from askings s
-  where s.question_id = q.id or s.question_id in (select j.id from questions j where j.joined_into = q.id))`
+export const ASKING = `(select count(distinct s.user_id)::int from askings s where ${TOGETHER})`
 
 const episodeJson = (table: string) => `json_build_object('id', ${table}.id, 'number', ${table}.number,
   'title', ${table}.title, 'slug', ${table}.slug, 'state', ${table}.state)`
@@ -13,7 +15,7 @@ const episodeJson = (table: string) => `json_build_object('id', ${table}.id, 'nu
 const ROWS = `select q.id, q.channel_id, c.slug as channel_slug, c.name as channel_name, c.time_zone,
   q.asker_id, u.name as asked_by, q.title, q.body, q.crop, q.stage, q.state, q.set_aside_reason, q.at_ms,
   q.answered_at, q.created_at, q.edition, ${ASKING} as asking,
-  exists (select from askings s where s.question_id = q.id and s.user_id = $2::uuid) as you_are_asking,
+  exists (select from askings s where s.user_id = $2::uuid and ${TOGETHER}) as you_are_asking,
   (select count(*)::int from questions j where j.joined_into = q.id) as joined,
   (select count(*)::int from verdicts v where v.question_id = q.id and v.settled) as settled_yes,
   (select count(*)::int from verdicts v where v.question_id = q.id and not v.settled) as settled_no,

@@ -3,14 +3,8 @@ import { line, paragraph, seconds } from '@/lib/episodes/schema'
 import { pageOf, pageQuery } from '@/lib/http/paging'
 import { crops } from '@/lib/topics/crops'
 import { topicByCode } from '@/lib/topics/rules'
+import { ANSWER_MOST, BODY_MOST, TITLE_MOST } from './limits'
 import { questionStates } from './rules'
-
-export const TITLE_MOST = 160
-export const BODY_MOST = 4000
-export const ANSWER_MOST = 2000
-/** How many are taken with one question, and how large each may be as it comes from the camera. */
-export const PHOTOS_MOST = 4
-export const PHOTO_BYTES_MOST = 15 * 1024 * 1024
 
 const words = (most: number) => paragraph(most).pipe(z.string().min(1, 'must not be empty'))
 
@@ -129,3 +123,7 @@ export const likenessOutput = z.object({
 })
 
 export const askingOutput = z.object({ asking: z.number(), youAreAsking: z.boolean() })
+
+/** An id out of a page's address; one that cannot be an id finds nothing, instead of failing in the database. */
+export const questionIdOf = (text: string): string =>
+  z.uuid().safeParse(text).success ? text : '00000000-0000-0000-0000-000000000000'
