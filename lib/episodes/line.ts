@@ -14,7 +14,13 @@ export type LoadedEpisode = Episode & {
   chapters: LoadedChapter[]
 }
 
-export const WITH_LINE = ['channel', 'season', 'footage', { association: 'chapters', include: ['topics'] }]
+/** Chapters come in a query of their own: joined, they would multiply the rows that a limit counts. */
+export const WITH_LINE = [
+  'channel',
+  'season',
+  'footage',
+  { association: 'chapters', include: ['topics'], separate: true },
+]
 
 /** What every view of an episode begins with. */
 export function headOf(row: LoadedEpisode): Omit<EpisodeLine, 'stages' | 'topics' | 'poster'> {

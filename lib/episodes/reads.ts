@@ -60,7 +60,7 @@ export async function listEpisodes(actor: Actor, channel: string, query: Episode
         topicWhere(query),
       ],
     },
-    include: WITH_LINE.map((one) => (typeof one === 'string' ? one : { ...one, separate: true })),
+    include: WITH_LINE,
     order: [['number', 'desc']],
     limit: query.limit + 1,
   })) as LoadedEpisode[]
@@ -71,7 +71,7 @@ export async function listEpisodes(actor: Actor, channel: string, query: Episode
 export async function newestEpisodes(most: number): Promise<EpisodeLine[]> {
   const rows = (await Episode.findAll({
     where: { state: 'published' },
-    include: WITH_LINE.map((one) => (typeof one === 'string' ? one : { ...one, separate: true })),
+    include: WITH_LINE,
     order: [['publishedAt', 'desc']],
     limit: most,
   })) as LoadedEpisode[]

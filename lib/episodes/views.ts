@@ -65,6 +65,9 @@ export type EpisodeView = Omit<EpisodeLine, 'stages' | 'topics' | 'poster'> & {
   answers: AnswerHereView[]
 }
 
+/** How many questions wait at a desk, by where they stand. */
+export type WaitingCounts = { newQuestions: number; queued: number; booked: number }
+
 export const episodeUrl = (channel: string, slug: string, atMs?: number | null) =>
   `/channels/${channel}/episodes/${slug}${atMs ? `?t=${atMs / 1000}` : ''}`
 

@@ -3,7 +3,10 @@
  */
 export function parseTime(written: string): number | null {
   const parts = written.trim().replace(',', '.').split(':')
-  if (parts.length > 3 || !parts.every((part, n) => (n === parts.length - 1 ? /^\d{1,5}(\.\d{1,3})?$/ : /^\d{1,5}$/).test(part)))
+  if (
+    parts.length > 3 ||
+    !parts.every((part, n) => (n === parts.length - 1 ? /^\d{1,5}(\.\d{1,3})?$/ : /^\d{1,5}$/).test(part))
+  )
     return null
   const numbers = parts.map(Number)
   if (numbers.slice(1).some((value) => value >= 60)) return null
@@ -16,5 +19,7 @@ export function writeTime(position: number): string {
   const seconds = (tenths % 600) / 10
   const minutes = Math.floor(tenths / 600)
   const tail = seconds.toFixed(1).padStart(4, '0')
-  return minutes < 60 ? `${minutes}:${tail}` : `${Math.floor(minutes / 60)}:${String(minutes % 60).padStart(2, '0')}:${tail}`
+  return minutes < 60
+    ? `${minutes}:${tail}`
+    : `${Math.floor(minutes / 60)}:${String(minutes % 60).padStart(2, '0')}:${tail}`
 }
