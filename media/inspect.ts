@@ -54,7 +54,7 @@ const incomplete = (percent: number) =>
  * Looks at a file before any work is spent on it. Refusals are answers for the owner, not exceptions; only trouble of our own
  * (no ffprobe, a read error) throws.
  */
-export async function inspectFilm(path: string): Promise<Inspection> {
+export async function inspectFilm(path: string, most: { durationS: number } = limits): Promise<Inspection> {
   if ((await stat(path)).size === 0)
     return refuse('not-a-film', 'This file is empty. Choose the film again and send it once more.')
   let found: Probe
@@ -73,7 +73,7 @@ export async function inspectFilm(path: string): Promise<Inspection> {
   }
   const video = found.streams.find((stream) => stream.codec_type === 'video' && stream.disposition?.attached_pic !== 1)
   if (!video) return refuse('no-picture', 'There is sound in this file but no picture. Send the film with its picture.')
-  return refuseByStream(video) ?? (await measured(path, found, video))
+  return refuseByStream(video) ?? (await measured(path, found, video, most.durationS))
 }
 
 /** The types of box that an MP4 or QuickTime file begins with (ISO/IEC 14496-12). */
@@ -135,7 +135,7 @@ function refuseByStream(video: ProbedStream): Inspection | null {
 }
 
 /** Header against packets: a header can promise an end that never arrived, or a length that was never filmed. */
-async function measured(path: string, found: Probe, video: ProbedStream): Promise<Inspection> {
+async function measured(path: string, found: Probe, video: ProbedStream, mostS: number): Promise<Inspection> {
   const promised = firstNumber(video.duration, found.format.duration)
   const patience = limits.probeMs * 4
   let duration = promised
@@ -159,14 +159,14 @@ async function measured(path: string, found: Probe, video: ProbedStream): Promis
   } catch (error) {
     return refusalOf(path, error)
   }
-  return lengthChecked(describe(found, video, duration ?? 0, notes))
+  return lengthChecked(describe(found, video, duration ?? 0, notes), mostS)
 }
 
-function lengthChecked(film: Film): Inspection {
-  if (film.duration > limits.durationS) {
+function lengthChecked(film: Film, mostS: number): Inspection {
+  if (film.duration > mostS) {
     return refuse(
       'too-long',
-      `This film lasts ${(film.duration / 3600).toFixed(1)} hours; ${limits.durationS / 3600} at most are taken. Cut it into parts and send each as its own episode.`,
+      `This film lasts ${(film.duration / 3600).toFixed(1)} hours; ${mostS / 3600} at most are taken. Cut it into parts and send each as its own episode.`,
     )
   }
   return { ok: true, film }

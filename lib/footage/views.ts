@@ -1,7 +1,8 @@
 import type { Footage } from '@/models/footage'
 import type { Rendition } from '@/models/rendition'
+import type { FootageState } from './rules'
 
-export type FootageState = 'receiving' | 'inspecting' | 'encoding' | 'ready' | 'failed'
+export type { FootageState }
 export type RenditionView = { height: number; bitrate: number; bytes: number; ready: boolean }
 export type FootageView = {
   id: string
