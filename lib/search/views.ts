@@ -3,7 +3,19 @@ import { stageOf, topicByCode, type Crop } from '@/lib/topics/rules'
 import type { SearchDocument } from './document-rules'
 import { spokenSnippet, withoutMarks } from './mark-rules'
 import type { SearchItem } from './schema'
-import type { Place } from './visible-reads'
+
+export type EpisodeRef = NonNullable<SearchItem['episode']>
+
+/** What the database says now of something that was found: its title, and where a click leads. */
+export type Place = {
+  title: string
+  /** The address, given the second that the words were found at. */
+  url: (second: number) => string
+  episode?: EpisodeRef
+  /** Where the place is a range by itself, as the answer to a question is. */
+  range?: { start: number; end: number }
+  state?: string
+}
 
 /** A document as it was found: its texts carry marks around the found words. */
 export type FoundDocument = Pick<

@@ -11,21 +11,9 @@ import { Explainer } from '@/models/explainer'
 import { Question } from '@/models/question'
 import { Term } from '@/models/term'
 import { publicQuestionStates } from './document-reads'
-import type { SearchItem } from './schema'
+import type { EpisodeRef, Place } from './views'
 
-type EpisodeRef = NonNullable<SearchItem['episode']>
 type WithChannel = Episode & { channel: Channel }
-
-/** What the database says now of something that was found: its title, and where a click leads. */
-export type Place = {
-  title: string
-  /** The address, given the second that the words were found at. */
-  url: (second: number) => string
-  episode?: EpisodeRef
-  /** Where the place is a range by itself, as the answer to a question is. */
-  range?: { start: number; end: number }
-  state?: string
-}
 
 const isPublic = (actor: Actor, row: Episode) => row.state === 'published' && may(actor, 'episode.see', row)
 

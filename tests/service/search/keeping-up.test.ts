@@ -7,6 +7,7 @@ import { nobody } from '@/lib/auth/actor'
 import { env } from '@/lib/env'
 import { searchDatabase } from '@/lib/search/database-reads'
 import { INDEX } from '@/lib/search/index-settings'
+import { readSearchPage } from '@/lib/search/page-reads'
 import { rebuildSearch } from '@/lib/search/rebuild-search'
 import { refreshSearchOf } from '@/lib/search/refresh-search'
 import { searchQuery, type SearchResult } from '@/lib/search/schema'
@@ -16,6 +17,7 @@ import { Chapter } from '@/models/chapter'
 import type { Channel } from '@/models/channel'
 import { Episode } from '@/models/episode'
 import { Question } from '@/models/question'
+import { Term } from '@/models/term'
 import type { User } from '@/models/user'
 import {
   makeCaptions,
@@ -161,6 +163,14 @@ it('a task that the search accepts and then fails makes the job fail, so that it
   await expect(replaceDocuments('episode-x', [broken])).rejects.toThrow('invalid_document_id')
 })
 
+it('where nothing is found, the nearest terms of the handbook are offered', async () => {
+  await Term.create({ slug: 'crown', label: 'Crown', definition: 'A stem.', field: 'Planting and growth' })
+  expect(await readSearchPage(nobody, searchQuery.parse({ q: 'corwn' }))).toMatchObject({
+    items: [],
+    near: [{ label: 'Crown', url: '/handbook/terms/crown' }],
+  })
+})
+
 describe('with the search down', () => {
   it('the API says so and when to come back; publishing goes on, and the index catches up', async () => {
     const episode = await makeReady('Weather cocks', 'Look at the anemometer.')
@@ -170,6 +180,10 @@ describe('with the search down', () => {
       expect(answer.status).toBe(503)
       expect(Number(answer.headers.get('retry-after'))).toBeGreaterThan(0)
       expect(answer.headers.get('content-type')).toContain('application/problem+json')
+      expect(await readSearchPage(nobody, searchQuery.parse({ q: 'concave' }))).toMatchObject({
+        result: null,
+        items: [{ title: 'Setting the combine, chapter' }],
+      })
       expect(await move(publish, episode)).toBe(200)
       await expect(workOff('search.refresh')).rejects.toThrow()
       expect(await waitingJobs('search.refresh')).not.toHaveLength(0)
