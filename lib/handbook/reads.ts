@@ -44,6 +44,12 @@ export async function listTerms({ cursor, limit }: EntriesQuery): Promise<Page<T
   return cutPage(rows as LoadedTerm[], limit, termLine, ({ label, slug }) => [label, slug])
 }
 
+/** The whole glossary, for the page that shows it from A to Z. */
+export async function everyTerm(): Promise<TermLine[]> {
+  const rows = await Term.findAll({ include: WITH_EXPLAINER, order: [['label', 'asc']] })
+  return (rows as LoadedTerm[]).map(termLine)
+}
+
 /** Where a term is said, in the episodes this actor may see, the newest first. */
 async function heardBy(actor: Actor, termId: string): Promise<HeardView[]> {
   const rows = (await Hearing.findAll({

@@ -1,4 +1,4 @@
-import type { ClaimEntry } from './entries'
+import type { Basis, ClaimEntry, Verdict } from './entries'
 import type { ExplainerState, Mention } from './views'
 
 export { markTerms } from './mentions'
@@ -41,6 +41,27 @@ export function checkWords({ state, sources }: { state: ExplainerState; sources:
   if (state === 'draft' || sources === 0) return 'Not checked yet'
   return `Being checked, so far against ${publications(sources)}`
 }
+
+const unchecked: Record<Basis, string> = {
+  'publication opened': 'Read in the publication, not judged yet',
+  'as transcribed elsewhere': 'As transcribed elsewhere; the publication itself is still to be opened',
+  'worked out': 'Worked out from the published formula',
+  'from memory': 'From memory; no publication opened yet',
+  'common practice': 'Common practice, no source',
+}
+
+const judged: Record<Verdict, string> = {
+  agrees: 'Agrees with the publication',
+  differs: 'Differs from the publication',
+  'not found': 'Not found in the publication',
+}
+
+/** What may be said of a claim: the verdict once somebody gave one, before that how the figure came here. */
+export const claimWords = ({ verdict, basis }: Pick<ClaimEntry, 'verdict' | 'basis'>): string =>
+  verdict ? judged[verdict] : (unchecked[basis] ?? unchecked['from memory'])
+
+/** A source's address if a browser may open it. What people type into the field is not trusted to be a link. */
+export const openable = (url: string | null): string | null => (url && /^https?:\/\//i.test(url) ? url : null)
 
 const number = new Intl.NumberFormat('en-US', { maximumFractionDigits: 6 })
 
@@ -93,4 +114,14 @@ export function cutAtMentions(text: string, mentions: readonly Mention[]) {
   }
   if (at < text.length) pieces.push({ from: at, text: text.slice(at), slug: null })
   return pieces
+}
+
+/** Entries under their first letters, both in the order of a dictionary; case and accents do not part a letter. */
+export function byLetter<T extends { label: string }>(terms: readonly T[]): { letter: string; terms: T[] }[] {
+  const letterOf = ({ label }: T) => label.normalize('NFD').charAt(0).toUpperCase()
+  const groups = new Map<string, T[]>()
+  for (const term of [...terms].sort((a, b) => a.label.localeCompare(b.label, 'en'))) {
+    groups.set(letterOf(term), [...(groups.get(letterOf(term)) ?? []), term])
+  }
+  return [...groups].map(([letter, under]) => ({ letter, terms: under }))
 }
