@@ -31,6 +31,10 @@ export function listAsked(asked: Query, channel?: string): ListAsked {
   }
   const read = questionsQuery.safeParse(given)
   const query = read.success ? read.data : questionsQuery.parse({ ...given, crop: undefined, cursor: undefined })
-  const filter = Object.entries({ channel: channel ? undefined : query.channel, crop: query.crop, state })
-  return { query, state, filter: Object.fromEntries(filter.filter((pair): pair is [string, string] => !!pair[1])) }
+  const farm = channel ? undefined : query.channel
+  return {
+    query,
+    state,
+    filter: { state, ...(farm ? { channel: farm } : {}), ...(query.crop ? { crop: query.crop } : {}) },
+  }
 }

@@ -3,12 +3,23 @@ import type { Actor } from '@/lib/auth/actor'
 import { may, permit } from '@/lib/auth/policy'
 import { readDeskChannel } from '@/lib/channels/reads'
 import { db } from '@/lib/db'
+import { notFound } from '@/lib/errors'
 import type { Page } from '@/lib/http/paging'
 import { Question } from '@/models/question'
+import { readComingEpisodes } from './booking-reads'
+import { alikeQuestions } from './likeness-reads'
 import { findQuestion, pageOf, QUESTION, readQuestion, viewOf } from './reads'
 import type { QuestionState } from './rules'
-import type { QuestionsQuery } from './schema'
-import { type DeskQuestionView, deskQuestionView, type QuestionEventView, type QuestionView } from './views'
+import { questionIdOf, type QuestionsQuery } from './schema'
+import {
+  type DeskQuestionView,
+  deskQuestionView,
+  type ComingEpisode,
+  type LikenessView,
+  type QueueFigures,
+  type QuestionEventView,
+  type QuestionView,
+} from './views'
 
 /** A question with what the desk sees besides. @throws Problem 404, 401 or 403 for anybody not at its desk */
 export async function readDeskQuestion(actor: Actor, id: string): Promise<DeskQuestionView> {
@@ -25,8 +36,6 @@ export async function readQueue(
   const channel = await readDeskChannel(actor, slug)
   return pageOf(actor, query, channel.id, deskQuestionView)
 }
-
-export type QueueFigures = { open: number; fresh: number; booked: number }
 
 /** How many wait at a channel's desk. @throws Problem 404, 401 */
 export async function readQueueFigures(actor: Actor, slug: string): Promise<QueueFigures> {
@@ -71,4 +80,27 @@ export async function readHistory(actor: Actor, id: string): Promise<QuestionEve
 export async function readForActor(actor: Actor, id: string): Promise<QuestionView | DeskQuestionView> {
   const question = await findQuestion(actor, id)
   return may(actor, 'question.sort', question) ? readDeskQuestion(actor, id) : readQuestion(actor, id)
+}
+
+export type Sheet = {
+  question: DeskQuestionView
+  history: QuestionEventView[]
+  alike: LikenessView[]
+  coming: ComingEpisode[]
+  mayBook: boolean
+}
+
+/** Everything that stands beside the queue for one question of this channel. @throws Problem 404 also for one of another channel */
+export async function readSheet(actor: Actor, slug: string, id: string): Promise<Sheet> {
+  const { id: channelId } = await readDeskChannel(actor, slug)
+  const row = await Question.findOne({ where: { id: questionIdOf(id), channelId } })
+  if (!row) throw notFound(QUESTION)
+  const [question, history, found, coming] = await Promise.all([
+    readDeskQuestion(actor, row.id),
+    readHistory(actor, row.id),
+    alikeQuestions(actor, channelId, { q: row.title, limit: 6 }),
+    readComingEpisodes(actor, slug),
+  ])
+  const alike = found.filter((other) => other.id !== row.id)
+  return { question, history, alike, coming, mayBook: may(actor, 'question.book', { channelId }) }
 }

@@ -38,10 +38,11 @@ const alikeSql = `with a as (select $1::text as text, tsvector_to_array(to_tsvec
   select q.id, q.title, q.state, ${ASKING} as asking, round(q.score::numeric, 3)::float as score from near q
   where q.score >= ${LEAST} order by q.score desc, q.created_at desc, q.id limit $5`
 
-async function alikeQuestions(
+/** Questions alone; for a desk that looks for what can be joined. */
+export async function alikeQuestions(
   actor: Actor,
   channelId: string | null,
-  { q, limit }: SimilarQuery,
+  { q, limit }: Pick<SimilarQuery, 'q' | 'limit'>,
 ): Promise<LikenessView[]> {
   const rows = await db().query<Row>(alikeSql, {
     bind: [q, channelId, deskChannelIds(actor), actor.id, limit],

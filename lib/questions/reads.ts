@@ -20,7 +20,8 @@ export const findQuestion = async (actor: Actor, id: string) =>
 /** How a row is shown to whoever looks. */
 export type View<T> = (row: QuestionRow, actor: Actor, useful: Useful) => T
 
-async function viewsOf<T>(ids: readonly string[], actor: Actor, view: View<T>): Promise<T[]> {
+/** The views of these ids in their order; whoever calls has asked for what this actor may see. */
+export async function viewsOf<T>(ids: readonly string[], actor: Actor, view: View<T>): Promise<T[]> {
   const rows = await questionRows(ids, actor)
   const usefulOf = await usefulOn(rows.map((row) => row.channel_id))
   return rows.map((row) => view(row, actor, usefulOf(row)))

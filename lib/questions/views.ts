@@ -62,6 +62,12 @@ export type QuestionEventView = {
   on: string
 }
 
+/** An episode that questions can be booked for. */
+export type ComingEpisode = { id: string; number: number; title: string }
+
+/** How many wait at a desk: all of them, the new ones, the booked ones. */
+export type QueueFigures = { open: number; fresh: number; booked: number }
+
 export type LikenessView = {
   kind: 'question' | 'passage'
   /** 0 nothing alike, 1 the same words */
