@@ -15,7 +15,7 @@ export function NothingFound({ query, near }: NothingFoundProps) {
       action={
         <>
           {narrowed && query.q && (
-            <ButtonLink href={searchHref({ q: query.q, limit: query.limit, stage: undefined })} variant="line">
+            <ButtonLink href={searchHref({ q: query.q, limit: query.limit })} variant="line">
               Find “{query.q}” everywhere
             </ButtonLink>
           )}

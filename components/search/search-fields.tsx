@@ -71,11 +71,7 @@ export function SearchFields({ query, facets, channelNames }: SearchFieldsProps)
         ))}
       </div>
       {isNarrowed(query) && (
-        <ButtonLink
-          href={searchHref({ q: query.q, limit: query.limit, stage: undefined })}
-          variant="quiet"
-          className="mt-3 -ml-2"
-        >
+        <ButtonLink href={searchHref({ q: query.q, limit: query.limit })} variant="quiet" className="mt-3 -ml-2">
           Take all choices back
         </ButtonLink>
       )}

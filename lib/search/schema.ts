@@ -40,7 +40,7 @@ export const searchQuery = z
     limit: z.coerce.number().int().min(1).max(50).default(20),
     cursor: open(z.string().max(100), 'take it from nextCursor'),
   })
-  .transform(({ stage, ...query }) => ({ ...query, stage: withCrop(stage, query.crop) }))
+  .transform(({ stage, ...query }) => ({ ...query, ...(stage ? { stage: withCrop(stage, query.crop) } : {}) }))
   .refine(({ stage }) => stage === undefined || !/^\d\d$/.test(stage), {
     path: ['stage'],
     error: 'name the crop as well, or give the whole code such as wheat-21',
@@ -51,9 +51,9 @@ export const searchQuery = z
   })
 
 /** `21` beside `crop=wheat` is `wheat-21`, where that crop has such a stage. */
-function withCrop(stage: string | undefined, crop: string | undefined): string | undefined {
+function withCrop(stage: string, crop: string | undefined): string {
   const whole = `${crop}-${stage}`
-  return stage && crop && topicByCode(whole) ? whole : stage
+  return topicByCode(whole) ? whole : stage
 }
 
 export type SearchQuery = z.infer<typeof searchQuery>
