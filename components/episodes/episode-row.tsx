@@ -4,13 +4,20 @@ import { fullDay } from '@/lib/dates/rules'
 import type { EpisodeLine } from '@/lib/episodes/views'
 import { lengthWords } from '@/lib/times/rules'
 import type { Topic } from '@/lib/topics/rules'
-import { stageWord } from '@/lib/topics/stage-words'
+import { cropWord, type Crop } from '@/lib/topics/crops'
+import { stageWord, type StageKey } from '@/lib/topics/stage-words'
+
+/** `Leaves`; with the crop before it where a row names several: `Maize, leaves`. */
+const stageWords = (stage: StageKey, named: Crop | null, crop: Crop | null) =>
+  named ? `${cropWord(named)}, ${stageWord(stage, crop).toLowerCase()}` : stageWord(stage, crop)
 
 /** One tag per crop and principal stage, however many two-digit codes the chapters name. */
 function stagesOf(topics: Topic[]) {
-  const seen = new Map<string, { stage: NonNullable<Topic['stage']>; crop: Topic['crop'] }>()
+  const seen = new Map<string, { stage: StageKey; crop: Crop | null }>()
   for (const { stage, crop } of topics) if (stage) seen.set(`${crop} ${stage}`, { stage, crop })
-  return [...seen.values()]
+  const stages = [...seen.values()]
+  const mixed = new Set(stages.flatMap(({ crop }) => crop ?? [])).size > 1
+  return stages.map(({ stage, crop }) => ({ stage, crop, word: stageWords(stage, mixed ? crop : null, crop) }))
 }
 
 function aboutWords({ filmedOn, duration, channel }: EpisodeLine, withFarm: boolean): string {
@@ -47,9 +54,9 @@ export function EpisodeRow({ episode, withFarm = false, level = 3 }: EpisodeRowP
         {episode.summary && <p className="mt-1.5 max-w-measure text-ink-2">{episode.summary}</p>}
         {stages.length > 0 && (
           <ul aria-label="Stages" className="mt-2.5 flex flex-wrap gap-1.5">
-            {stages.map(({ stage, crop }) => (
+            {stages.map(({ stage, crop, word }) => (
               <li key={`${crop} ${stage}`} className="max-w-full">
-                <StageTag stage={stage} word={stageWord(stage, crop)} />
+                <StageTag stage={stage} word={word} />
               </li>
             ))}
           </ul>

@@ -34,18 +34,20 @@ export function PersonLinks({ person, className }: { person: FramePerson | null;
   )
 }
 
-/** Without a script the link leads to a page that asks once more; a plain link must not end a session by itself. */
+/** Without a script the form leads to a page that asks once more; reading an address must not end a session by itself. */
 function SignOut({ className }: { className: string }) {
   return (
-    <a
-      href="/api/auth/signout"
-      className={className}
-      onClick={(event) => {
+    <form
+      action="/api/auth/signout"
+      method="get"
+      onSubmit={(event) => {
         event.preventDefault()
         void signOut({ callbackUrl: '/' })
       }}
     >
-      Sign out
-    </a>
+      <button type="submit" className={classNames(className, 'w-full')}>
+        Sign out
+      </button>
+    </form>
   )
 }

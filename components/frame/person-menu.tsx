@@ -30,7 +30,7 @@ export function PersonMenu({ person }: { person: FramePerson | null }) {
       </details>
       {desk && (
         <>
-          <span aria-hidden="true" className="text-on-loam-2">
+          <span aria-hidden="true" className="text-sm text-on-loam-2">
             ·
           </span>
           <Link href={`/desk/${desk.slug}`} className={link}>

@@ -15,7 +15,7 @@ type BesideBoardProps = {
 /** What stands under a season board: the same week in other years, and what waits for an answer. */
 export function BesideBoard({ today, otherYears, waiting, channel }: BesideBoardProps) {
   return (
-    <div className="sheet mt-6 grid divide-rule md:mt-7 md:grid-cols-2 md:divide-x">
+    <div className="sheet mt-6 grid divide-rule md:mt-7 md:grid-cols-[minmax(0,1fr)_minmax(0,1.4fr)] md:divide-x">
       <section className="border-b border-rule-2 p-4 md:border-b-0 md:p-5.5">
         <h2 className="mb-3">This week in other years</h2>
         {otherYears.length > 0 ? (

@@ -60,7 +60,7 @@ function StripLane({
         )}
       </span>
       <span className="text-right text-ink-2 md:text-left">
-        {stage ? `${stageWord(stage.stage, crop)} now` : 'nothing standing now'}
+        {stage ? `${stageWord(stage.stage, crop)} now` : 'no stage set now'}
       </span>
     </li>
   )

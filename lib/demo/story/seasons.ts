@@ -98,6 +98,22 @@ export const plantings: StoryPlanting[] = [
   {
     ...alder,
     season: '2026',
+    crop: 'wheat',
+    field: 'River Piece',
+    acres: 41,
+    plantedOn: '2026-10-28',
+    periods: windows(
+      [
+        ['soil', '2026-10-25'],
+        ['0', '2026-10-28'],
+        ['1', '2026-11-12'],
+      ],
+      '2026-12-31',
+    ),
+  },
+  {
+    ...alder,
+    season: '2026',
     crop: 'maize',
     field: 'Church Bottom',
     acres: 38,
