@@ -28,15 +28,13 @@ export function frameAt(episode: StoryEpisode, sheet: CutSheet, ms: number): str
   const scene = scenes[episode.chapters[index]?.scene ?? '']
   if (!chapter || !scene) throw new Error(`${episode.key} has no picture at ${ms} ms`)
   const said = sheet.cues.filter((cue) => cue.chapter === index)
-  const line = Math.max(
-    0,
-    said.findLastIndex((cue) => cue.startMs <= ms),
-  )
+  const line = said.findLast((cue) => cue.startMs <= ms)?.line ?? 0
+  const began = said.find((cue) => cue.line === line)?.startMs ?? 0
   const clock: Clock = {
     t: (ms - chapter.startMs) / 1000,
     of: (chapter.endMs - chapter.startMs) / 1000,
     line,
-    since: Math.max(0, (ms - (said[line]?.startMs ?? 0)) / 1000),
+    since: Math.max(0, (ms - began) / 1000),
   }
   return picture(scene(clock))
 }

@@ -5,8 +5,8 @@ import { join } from 'node:path'
 import { promisify } from 'node:util'
 import { cutSheet, type CutSheet } from './cut-sheet'
 import { voices } from './story/people'
-import { linesOf } from './story/story'
-import type { Line, Speaker, StoryEpisode } from './story/types'
+import { phrasesOf } from './story/story'
+import type { Speaker, StoryEpisode } from './story/types'
 import { heardPart, sampleRate, samplesOf, wavOf } from './wav'
 
 const run = promisify(execFile)
@@ -18,7 +18,7 @@ export type Voiced = { sheet: CutSheet; sound: string }
  * captions made from it are true to a millisecond. Kept in `folder` by a hash of the words and voices.
  */
 export async function voiceLines(episode: StoryEpisode, owner: Speaker, folder: string): Promise<Voiced> {
-  const lines = linesOf(episode).map(({ line }) => ({ line, speaker: line.by ?? owner }))
+  const lines = phrasesOf(episode).map(({ voiced, by }) => ({ voiced, speaker: by ?? owner }))
   const name = `${episode.key}-${hashOf(lines)}`
   const sound = join(folder, `${name}.wav`)
   const notes = join(folder, `${name}.json`)
@@ -27,7 +27,7 @@ export async function voiceLines(episode: StoryEpisode, owner: Speaker, folder: 
 
   await mkdir(folder, { recursive: true })
   const spoken: Int16Array[] = []
-  for (const { line, speaker } of lines) spoken.push(await speak(line, speaker, join(folder, `${name}.part`)))
+  for (const { voiced, speaker } of lines) spoken.push(await speak(voiced, speaker, join(folder, `${name}.part`)))
   const spokenMs = spoken.map((samples) => Math.round((samples.length / sampleRate) * 1000))
   const sheet = cutSheet(episode, owner, spokenMs)
   await writeWhole(sound, wavOf(layOut(sheet, spoken)))
@@ -35,10 +35,10 @@ export async function voiceLines(episode: StoryEpisode, owner: Speaker, folder: 
   return { sheet, sound }
 }
 
-async function speak(line: Line, speaker: Speaker, part: string): Promise<Int16Array> {
+async function speak(words: string, speaker: Speaker, part: string): Promise<Int16Array> {
   const { voice, pitch, pace } = voices[speaker]
   const settings = ['--setf', `f0_shift=${pitch}`, '--setf', `duration_stretch=${pace}`]
-  await run('flite', ['-voice', voice, ...settings, '-t', line.voiced ?? line.text, '-o', part], { timeout: 60_000 })
+  await run('flite', ['-voice', voice, ...settings, '-t', words, '-o', part], { timeout: 60_000 })
   const samples = heardPart(samplesOf(await readFile(part)))
   await rm(part)
   return samples
@@ -52,8 +52,8 @@ function layOut(sheet: CutSheet, spoken: Int16Array[]): Int16Array {
   return track
 }
 
-function hashOf(lines: { line: Line; speaker: Speaker }[]): string {
-  const words = lines.map(({ line, speaker }) => [line.voiced ?? line.text, voices[speaker]])
+function hashOf(lines: { voiced: string; speaker: Speaker }[]): string {
+  const words = lines.map(({ voiced, speaker }) => [voiced, voices[speaker]])
   return createHash('sha256').update(JSON.stringify(words)).digest('hex').slice(0, 12)
 }
 

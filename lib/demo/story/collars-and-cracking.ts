@@ -21,7 +21,7 @@ export const collarsAndCracking: StoryEpisode = {
       scene: 'collars',
       lines: [
         { text: 'Start at the short rounded leaf, because it counts.', key: 'round-leaf' },
-        { text: 'Follow each blade down to its collar, the pale band where it meets the sheath.' },
+        { text: 'Follow each blade down to its collar, | the pale band where it meets the sheath.' },
         {
           text: 'One, two, three.',
           key: 'three-collars',
@@ -77,6 +77,7 @@ export const collarsAndCracking: StoryEpisode = {
         {
           text: 'Each collar after that takes about 82.',
           voiced: 'Each collar after that takes about eighty two.',
+          key: 'per-collar',
           reading: { quantity: 'heat units per collar', value: 82, unit: '°F days', note: 'to the tenth leaf' },
         },
         {
@@ -93,7 +94,7 @@ export const collarsAndCracking: StoryEpisode = {
       scene: 'bean-cracking',
       lines: [
         { text: 'Next door the soybeans are cracking.', key: 'cracking' },
-        { text: 'The stem pulls the seed leaves up bent double, so a hard crust breaks necks.' },
+        { text: 'The stem pulls the seed leaves up bent double, | so a hard crust breaks necks.' },
         { text: 'Two days later the cotyledons are open and the stand can be counted.', key: 'bean-stand' },
       ],
     },

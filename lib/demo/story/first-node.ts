@@ -22,7 +22,7 @@ export const firstNode: StoryEpisode = {
       lines: [
         { text: 'Pull the main stem and slit it from the bottom.' },
         {
-          text: 'The first node counts when it sits 1 centimetre above the tillering node.',
+          text: 'The first node counts | when it sits 1 centimetre above the tillering node.',
           key: 'node',
           reading: { quantity: 'first node above the tillering node', value: 1, unit: 'cm' },
         },
@@ -48,8 +48,9 @@ export const firstNode: StoryEpisode = {
       lines: [
         { text: 'Osei asked which hoop to use in narrow rows.', by: 'tomasz', key: 'hoop-size' },
         {
-          text: 'One square foot is a ring 13 and a half inches across, whatever the rows are.',
-          voiced: 'One square foot is a ring thirteen and a half inches across, whatever the rows are.',
+          text: 'One square foot is a ring 13 and a half inches across, | whatever the rows are.',
+          voiced: 'One square foot is a ring thirteen and a half inches across, | whatever the rows are.',
+          key: 'ring',
           reading: { quantity: 'hoop of one square foot', value: 13.5, unit: 'in', note: 'inside diameter' },
         },
         { text: 'Or lay a stick along the row.' },

@@ -42,7 +42,7 @@ export const fitToWork: StoryEpisode = {
           voiced: 'At field capacity it holds about thirty and a half.',
         },
         {
-          text: 'Divide the rain by that gap, and 25 millimetres reaches about 200 millimetres down.',
+          text: 'Divide the rain by that gap, | and 25 millimetres reaches about 200 millimetres down.',
           key: 'front',
           reading: {
             quantity: 'depth of the wetting front',
@@ -59,9 +59,9 @@ export const fitToWork: StoryEpisode = {
       topics: ['soil', 'subject-soil'],
       scene: 'thread',
       lines: [
-        { text: 'Take a pinch from the depth you mean to work, and roll it on a board.' },
+        { text: 'Take a pinch from the depth you mean to work, | and roll it on a board.' },
         {
-          text: 'A thread 3 millimetres thick that just crumbles is at the plastic limit.',
+          text: 'A thread 3 millimetres thick | that just crumbles is at the plastic limit.',
           key: 'thread',
           reading: { quantity: 'thread of soil', value: 3, unit: 'mm', note: 'thickness at the plastic limit' },
         },
@@ -77,10 +77,10 @@ export const fitToWork: StoryEpisode = {
         { text: 'So we go shallow, one pass, and leave the wet layer alone.', key: 'shallow' },
         { text: 'Work it wet and you make clods that last until spring.' },
         {
-          text: 'Nobody rides along, and I stop the engine and take the key before I clear a sweep.',
+          text: 'Nobody rides along, | and I stop the engine and take the key before I clear a sweep.',
           key: 'tillage-caution',
         },
-        { text: 'What we want is a level seedbed with crumbs on top and firm ground underneath.' },
+        { text: 'What we want is a level seedbed | with crumbs on top and firm ground underneath.' },
       ],
     },
   ],

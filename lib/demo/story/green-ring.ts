@@ -63,7 +63,7 @@ export const greenRing: StoryEpisode = {
       topics: ['rice-55', 'rice-65'],
       scene: 'panicle',
       lines: [
-        { text: 'Here the panicle is half out of the sheath, which is the middle of heading.', key: 'heading' },
+        { text: 'Here the panicle is half out of the sheath, | which is the middle of heading.', key: 'heading' },
         { text: 'Anthers hang at the tip first, and flowering runs down from there.' },
         { text: 'Walk on the levee, and leave the crop alone at midday.' },
       ],

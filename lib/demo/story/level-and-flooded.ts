@@ -36,7 +36,7 @@ export const levelAndFlooded: StoryEpisode = {
           reading: { quantity: 'water held on the terrace', value: 5, unit: 'cm', note: 'as measured at the gate' },
         },
         {
-          text: 'Water running over a levee is deeper and faster than it looks, so keep out of it.',
+          text: 'Water running over a levee is deeper and faster than it looks, | so keep out of it.',
           key: 'levee-caution',
         },
       ],

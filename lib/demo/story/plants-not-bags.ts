@@ -41,6 +41,7 @@ export const plantsNotBags: StoryEpisode = {
       lines: [
         {
           text: 'I want 30 plants on each square foot.',
+          key: 'plants-wanted',
           reading: { quantity: 'plants wanted', value: 30, unit: 'per square foot' },
         },
         {
@@ -70,7 +71,10 @@ export const plantsNotBags: StoryEpisode = {
       lines: [
         { text: 'I start at the headland, stop, and dig behind the drill.' },
         { text: 'Seed wants moist soil under it and a closed slot over it.' },
-        { text: 'If a tube blocks, everything stops and the key is in my pocket before I look.', key: 'drill-caution' },
+        {
+          text: 'If a tube blocks, everything stops | and the key is in my pocket before I look.',
+          key: 'drill-caution',
+        },
         { text: 'Then one long pull, and turn round at the end.' },
       ],
     },

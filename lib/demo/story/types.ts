@@ -4,9 +4,9 @@ export type Speaker = 'nell' | 'tomasz' | 'imani' | 'sunniva'
 /** A measurement said on camera, in the words of product.md. */
 export type StoryReading = { quantity: string; value: number; unit: string; note?: string }
 
-/** One spoken sentence: it becomes one stretch of sound and one caption cue, so the two cannot drift apart. */
+/** One spoken sentence. Each of its phrases becomes one stretch of sound and one cue, so the two cannot drift apart. */
 export type Line = {
-  /** The caption. */
+  /** The caption; ` | ` parts phrases where one cue would be too long to read. */
   text: string
   /** Only where the synthesiser would misread the caption: the same words, spelled for the ear. */
   voiced?: string

@@ -23,7 +23,7 @@ export const wheatOff: StoryEpisode = {
         { text: 'The kernel is hard, and a thumbnail leaves no mark.', key: 'hard-kernel' },
         { text: 'Go too late and it will shatter in front of the combine.' },
         {
-          text: 'Nobody stands near the header, and it is off and still before anyone clears it.',
+          text: 'Nobody stands near the header, | and it is off and still before anyone clears it.',
           key: 'header-caution',
         },
         {
@@ -47,7 +47,7 @@ export const wheatOff: StoryEpisode = {
         },
         { text: 'And never step into a bin on moving grain.', by: 'imani', key: 'bin-caution' },
         {
-          text: 'Lock out the auger, test the air, wear the harness and line, and keep someone outside.',
+          text: 'Lock out the auger, test the air, | wear the harness and line, and keep someone outside.',
           by: 'imani',
           key: 'bin-steps',
         },

@@ -35,7 +35,7 @@ export const wheatStand: StoryEpisode = {
       scene: 'hoop',
       lines: [
         {
-          text: 'Walk in well past the headland, toss the hoop over your shoulder, and count where it lands.',
+          text: 'Walk in well past the headland, | toss the hoop over your shoulder, | and count where it lands.',
           key: 'hoop',
         },
         {
@@ -45,7 +45,7 @@ export const wheatStand: StoryEpisode = {
         },
         { text: 'A plant is one crown, not one stem.', key: 'one-crown' },
         { text: 'Do ten of these on a zigzag, and keep the bad ones in.' },
-        { text: 'One bare patch is a wet spot. Bare patches in every throw are a stand problem.' },
+        { text: 'One bare patch is a wet spot. | Bare patches in every throw are a stand problem.' },
       ],
     },
     {

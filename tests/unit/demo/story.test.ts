@@ -5,16 +5,16 @@ import { channels } from '@/lib/demo/story/channels'
 import { people } from '@/lib/demo/story/people'
 import { questions } from '@/lib/demo/story/questions'
 import { plantings } from '@/lib/demo/story/seasons'
-import { episodes, filmed, linesOf } from '@/lib/demo/story/story'
+import { episodes, filmed, phrasesOf } from '@/lib/demo/story/story'
 import type { StoryEpisode } from '@/lib/demo/story/types'
 import { stageOf, topicByCode } from '@/lib/topics/rules'
 
-/** A cut sheet without a synthesiser: every sentence takes as long as its letters at a speaking pace. */
+/** A cut sheet without a synthesiser: every phrase takes as long as its letters at a speaking pace. */
 const pacedSheet = (episode: StoryEpisode) =>
   cutSheet(
     episode,
     'nell',
-    linesOf(episode).map(({ line }) => line.text.length * 62),
+    phrasesOf(episode).map(({ text }) => text.length * 62),
   )
 
 const episodeOf = (key: string) => {
@@ -72,6 +72,10 @@ describe('the films of the demo', () => {
         expect(frameAt(episode, sheet, ms)).not.toMatch(/NaN|undefined|Infinity/)
       }
     }
+  })
+
+  it('break captions so that two lines of 37 letters hold them', () => {
+    for (const { text } of filmed.flatMap(phrasesOf)) expect(text.length, text).toBeLessThanOrEqual(74)
   })
 
   it('keep sentences in order, inside their chapters, with silence between them', () => {
