@@ -3,8 +3,16 @@ import type { ReactNode } from 'react'
 import type { EpisodeView } from '@/lib/episodes/views'
 import { dayAndMonth } from '@/lib/dates/rules'
 
-/** Where the episode stands, its title, and the page's action. */
-export function WatchHead({ episode, children }: { episode: EpisodeView; children: ReactNode }) {
+type WatchHeadProps = {
+  episode: EpisodeView
+  /** What can hurt somebody in this work; stands at the head of the episode. */
+  cautions: ReactNode
+  /** The page's action. */
+  children: ReactNode
+}
+
+/** Where the episode stands, its title, the cautions of its work, and the page's action. */
+export function WatchHead({ episode, cautions, children }: WatchHeadProps) {
   const { channel, season, number, filmedOn, duration } = episode
   const facts = [
     season && `${season} season`,
@@ -24,6 +32,7 @@ export function WatchHead({ episode, children }: { episode: EpisodeView; childre
         <h1 className="max-w-[22ch]">{episode.title}</h1>
       </div>
       {children}
+      <div className="w-full empty:hidden">{cautions}</div>
     </div>
   )
 }

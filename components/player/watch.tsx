@@ -1,6 +1,8 @@
+import { CautionNotes } from '@/components/questions/caution-notes'
 import type { CueText } from '@/lib/captions/rules'
 import type { EpisodeView } from '@/lib/episodes/views'
 import type { TermNote } from '@/lib/handbook/views'
+import { cautionsFor } from '@/lib/topics/cautions'
 import { AnswersHere } from './answers-here'
 import { AsSpoken } from './as-spoken'
 import { AskHere } from './ask-here'
@@ -25,7 +27,7 @@ type WatchProps = {
 }
 
 /**
- * The watch page under its cautions. One grid serves both shapes: wide, the title over picture and row with the text
+ * The watch page. One grid serves both shapes: wide, the title over picture and row with the text
  * beside them; narrow, the picture first and held in view while the text runs under it.
  */
 export function Watch({ episode, spoken, notes, askName, openAt }: WatchProps) {
@@ -36,7 +38,7 @@ export function Watch({ episode, spoken, notes, askName, openAt }: WatchProps) {
     <PlaybackProvider key={episode.id} at={Math.min(openAt ?? 0, duration)} duration={duration}>
       <KeptPlace episodeId={episode.id} openAt={openAt} />
       <div className="flex flex-col max-lg:-mx-[clamp(0.875rem,2.5vw,2rem)] lg:grid lg:grid-cols-[minmax(0,1.55fr)_minmax(0,1fr)] lg:grid-rows-[auto_auto_auto_1fr]">
-        <WatchHead episode={episode}>
+        <WatchHead episode={episode} cautions={<CautionNotes cautions={cautionsOf(episode)} />}>
           {published && <AskHere episodeId={episode.id} askName={askName} className="max-lg:hidden print:hidden" />}
         </WatchHead>
         <div
@@ -78,6 +80,9 @@ export function Watch({ episode, spoken, notes, askName, openAt }: WatchProps) {
     </PlaybackProvider>
   )
 }
+
+const cautionsOf = ({ chapters }: EpisodeView) =>
+  cautionsFor(chapters.flatMap(({ topics }) => topics.map(({ code }) => code)))
 
 /** Captions in the language that is spoken come first: they are the ones shown until the viewer chooses. */
 function ownLanguageFirst({ captions, language }: EpisodeView) {
