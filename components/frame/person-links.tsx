@@ -28,6 +28,11 @@ export function PersonLinks({ person, className }: { person: FramePerson | null;
         </li>
       ))}
       <li>
+        <Link href="/account" className={item}>
+          Your account
+        </Link>
+      </li>
+      <li>
         <SignOut className={item} />
       </li>
     </ul>

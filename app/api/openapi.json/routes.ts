@@ -2,6 +2,8 @@ import type { Routes } from '@/lib/http/openapi'
 import * as channels from '../channels/route'
 import * as channelsChannel from '../channels/[channel]/route'
 import * as channelsChannelEpisodes from '../channels/[channel]/episodes/route'
+import * as channelsChannelPeople from '../channels/[channel]/people/route'
+import * as channelsChannelPeoplePerson from '../channels/[channel]/people/[person]/route'
 import * as channelsChannelSeasons from '../channels/[channel]/seasons/route'
 import * as channelsChannelSeasonsYear from '../channels/[channel]/seasons/[year]/route'
 import * as episodesId from '../episodes/[id]/route'
@@ -21,6 +23,9 @@ import * as explainers from '../explainers/route'
 import * as explainersSlug from '../explainers/[slug]/route'
 import * as health from '../health/route'
 import * as me from '../me/route'
+import * as meSessions from '../me/sessions/route'
+import * as meTokens from '../me/tokens/route'
+import * as meTokensId from '../me/tokens/[id]/route'
 import * as questions from '../questions/route'
 import * as questionsId from '../questions/[id]/route'
 import * as questionsIdAnswer from '../questions/[id]/answer/route'
@@ -44,6 +49,8 @@ export const routes: Routes = {
   '/api/channels': channels,
   '/api/channels/{channel}': channelsChannel,
   '/api/channels/{channel}/episodes': channelsChannelEpisodes,
+  '/api/channels/{channel}/people': channelsChannelPeople,
+  '/api/channels/{channel}/people/{person}': channelsChannelPeoplePerson,
   '/api/channels/{channel}/seasons': channelsChannelSeasons,
   '/api/channels/{channel}/seasons/{year}': channelsChannelSeasonsYear,
   '/api/episodes/{id}': episodesId,
@@ -63,6 +70,9 @@ export const routes: Routes = {
   '/api/explainers/{slug}': explainersSlug,
   '/api/health': health,
   '/api/me': me,
+  '/api/me/sessions': meSessions,
+  '/api/me/tokens': meTokens,
+  '/api/me/tokens/{id}': meTokensId,
   '/api/questions': questions,
   '/api/questions/{id}': questionsId,
   '/api/questions/{id}/answer': questionsIdAnswer,
