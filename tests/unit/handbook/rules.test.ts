@@ -1,5 +1,13 @@
 import { describe, expect, it } from 'vitest'
-import { checkWords, cutAtMentions, explainerState, figure, weaveClaims } from '@/lib/handbook/rules'
+import {
+  byLetter,
+  checkWords,
+  claimWords,
+  cutAtMentions,
+  explainerState,
+  figure,
+  weaveClaims,
+} from '@/lib/handbook/rules'
 
 const agrees = { verdict: 'agrees' } as const
 const open = { verdict: null } as const
@@ -95,5 +103,25 @@ describe('cutting a text at its terms', () => {
     ])
     expect(pieces).toEqual([{ from: 0, text: 'crown', slug: 'crown' }])
     expect(cutAtMentions('', [{ from: 0, to: 1, slug: 'x' }])).toEqual([])
+  })
+})
+
+describe('what is said of a claim', () => {
+  it('is the verdict once there is one, before that how the figure came here', () => {
+    expect(claimWords({ verdict: 'differs', basis: 'publication opened' })).toBe('Differs from the publication')
+    expect(claimWords({ verdict: null, basis: 'worked out' })).toBe('Worked out from the published formula')
+    expect(claimWords({ verdict: null, basis: 'from memory' })).toBe('From memory; no publication opened yet')
+  })
+})
+
+describe('the glossary by letters', () => {
+  it('keeps case and accents under one letter, in the order of a dictionary', () => {
+    const labels = ['ROPS', 'crust', 'épi', 'emergence', 'Crown']
+    const letters = byLetter(labels.map((label) => ({ label })))
+    expect(letters.map(({ letter, terms }) => [letter, terms.map(({ label }) => label)])).toEqual([
+      ['C', ['Crown', 'crust']],
+      ['E', ['emergence', 'épi']],
+      ['R', ['ROPS']],
+    ])
   })
 })
