@@ -1,3 +1,4 @@
+import { createReadStream } from 'node:fs'
 import { uploadName, finishFootage } from '@/lib/footage/writes'
 import { services } from '@/lib/services'
 import { NameTaken } from '@/media/storage'
@@ -26,7 +27,7 @@ export async function drawAndSend({ footageId, episode: key }: { footageId: stri
 async function arrive(footage: Footage, film: string): Promise<void> {
   const { storage } = services()
   const name = uploadName(footage.id)
-  await storage.adopt(name, film).catch((failure: unknown) => {
+  await storage.put(name, createReadStream(film)).catch((failure: unknown) => {
     if (!(failure instanceof NameTaken)) throw failure
   })
   const stored = await storage.stat(name)

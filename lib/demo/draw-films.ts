@@ -55,7 +55,7 @@ export async function drawFilm(episode: StoryEpisode, voiced: Voiced, folder: st
   )
     return film
 
-  const part = join(folder, `${episode.key}-${hash}.part.mp4`)
+  const part = join(folder, `${episode.key}-${hash}.${process.pid}.part.mp4`)
   const encoder = spawn('ffmpeg', encoderArguments(voiced.sound, part), { stdio: ['pipe', 'ignore', 'pipe'] })
   const said: Buffer[] = []
   encoder.stderr.on('data', (chunk: Buffer) => said.push(chunk))

@@ -1,5 +1,7 @@
 import { resolve } from 'node:path'
-import { env } from '@/lib/env'
 
-/** Where spoken lines and drawn films are kept: beside the media, not in them, for they can be made again. */
-export const demoFolder = (): string => resolve(env().MEDIA_ROOT, '..', 'demo')
+/**
+ * Where spoken lines and drawn films are kept. In the project's own data folder, whatever installation asks: they are
+ * named after their content, and a test run needs not draw again what the demo has drawn.
+ */
+export const demoFolder = (): string => resolve('.data', 'demo')

@@ -27,7 +27,8 @@ export async function voiceLines(episode: StoryEpisode, owner: Speaker, folder: 
 
   await mkdir(folder, { recursive: true })
   const spoken: Int16Array[] = []
-  for (const { voiced, speaker } of lines) spoken.push(await speak(voiced, speaker, join(folder, `${name}.part`)))
+  for (const { voiced, speaker } of lines)
+    spoken.push(await speak(voiced, speaker, join(folder, `${name}.${process.pid}.part`)))
   const spokenMs = spoken.map((samples) => Math.round((samples.length / sampleRate) * 1000))
   const sheet = cutSheet(episode, owner, spokenMs)
   await writeWhole(sound, wavOf(layOut(sheet, spoken)))
@@ -59,6 +60,7 @@ function hashOf(lines: { voiced: string; speaker: Speaker }[]): string {
 
 /** A killed run leaves no half file under the final name. */
 async function writeWhole(path: string, content: Buffer | string): Promise<void> {
-  await writeFile(`${path}.new`, content)
-  await rename(`${path}.new`, path)
+  const unfinished = `${path}.${process.pid}.new`
+  await writeFile(unfinished, content)
+  await rename(unfinished, path)
 }
