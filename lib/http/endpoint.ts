@@ -25,6 +25,8 @@ export type EndpointSpec<P, Q, I> = {
   open?: true
   /** `raw`: the body is the endpoint's own business (uploads, forms). */
   body?: 'json' | 'raw'
+  /** Reads the body where it may also be a form; what it gives counts as the input, and so for Idempotency-Key too. */
+  read?: (request: Request) => Promise<I>
 }
 
 export type Asked<P, Q, I> = {
@@ -54,6 +56,11 @@ function toResponse(answer: unknown): Response {
   })
 }
 
+async function inputOf<P, Q, I>({ input, body, read }: EndpointSpec<P, Q, I>, request: Request): Promise<I> {
+  if (read) return read(request)
+  return input && body !== 'raw' ? parseJson(input, request) : (undefined as I)
+}
+
 async function ask<P, Q, I>(spec: EndpointSpec<P, Q, I>, request: Request, context: Context, requestId: string) {
   const actor = await actorOf(request)
   if (!READS.has(request.method)) {
@@ -63,7 +70,7 @@ async function ask<P, Q, I>(spec: EndpointSpec<P, Q, I>, request: Request, conte
   const params = spec.params ? parseParams(spec.params, await context.params) : (undefined as P)
   const query = spec.query ? parseQuery(spec.query, new URL(request.url)) : (undefined as Q)
   const edition = spec.edition ? parseEdition(request, spec.edition) : ANY_EDITION
-  const input = spec.input && spec.body !== 'raw' ? await parseJson(spec.input, request) : (undefined as I)
+  const input = await inputOf(spec, request)
   return { request, actor, params, query, input, edition, requestId } satisfies Asked<P, Q, I>
 }
 

@@ -30,7 +30,8 @@ export async function readForm(upload: RequestHandler, request: Request, most: n
   const asked = Object.assign(stream, {
     method: request.method,
     url: request.url,
-    headers: Object.fromEntries(request.headers),
+    // multer takes a form for absent when neither length nor encoding is told, as in a Request made by hand.
+    headers: { 'transfer-encoding': 'chunked', ...Object.fromEntries(request.headers) },
   }) as unknown as ExpressRequest
   const abort = () => stream.destroy(new Error('the sender went away'))
   request.signal.addEventListener('abort', abort, { once: true })

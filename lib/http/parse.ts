@@ -38,6 +38,11 @@ export async function parseJson<T>(schema: z.ZodType<T>, request: Request): Prom
   if (raw.length > JSON_LIMIT) throw tooLarge('At most 1 MB of JSON.')
   const type = request.headers.get('content-type') ?? ''
   if (raw !== '' && !/^application\/(json|[\w.+-]+\+json)\b/i.test(type)) throw wrongType('Send application/json.')
+  return checkJson(schema, raw)
+}
+
+/** The same for JSON text that did not come as the body, such as the fields of a form. */
+export function checkJson<T>(schema: z.ZodType<T>, raw: string): T {
   refuseNul(raw)
   const read = schema.safeParse(jsonOf(raw))
   if (read.success) return read.data

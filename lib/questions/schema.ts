@@ -4,6 +4,7 @@ import { pageOf, pageQuery } from '@/lib/http/paging'
 import { crops } from '@/lib/topics/crops'
 import { topicByCode } from '@/lib/topics/rules'
 import { ANSWER_MOST, BODY_MOST, TITLE_MOST } from './limits'
+import type { DrawnPhoto } from './redraw-photos'
 import { questionStates } from './rules'
 
 const words = (most: number) => paragraph(most).pipe(z.string().min(1, 'must not be empty'))
@@ -35,6 +36,12 @@ export const askInput = z
     ruleBroken('this stage belongs to another crop', 'stage'),
   )
 export type AskInput = z.infer<typeof askInput>
+
+/** A question on its way in: as JSON it brings no photos, as a form up to four of them. */
+export type Asking = { input: AskInput; photos: readonly DrawnPhoto[] }
+export const askForm = askInput.transform((input): Asking => ({ input, photos: [] }))
+
+export const photoParams = z.object({ name: z.string().regex(/^[0-9a-f-]{36}\.webp$/) })
 
 export const questionParams = z.object({ id: z.uuid() })
 

@@ -12,9 +12,11 @@ import { topicByCode } from '@/lib/topics/rules'
 import { Asking } from '@/models/asking'
 import type { Channel } from '@/models/channel'
 import { Question } from '@/models/question'
+import { keepPhotos } from './keep-photos'
 import { leaveTrace, refreshQuestion } from './moves'
 import { type AskPlace, readAskPlace } from './place-reads'
 import { readQuestion } from './reads'
+import type { DrawnPhoto } from './redraw-photos'
 import type { AskInput } from './schema'
 import type { QuestionView } from './views'
 
@@ -54,7 +56,11 @@ function subjectOf(input: AskInput, place: AskPlace | null): { crop: string | nu
  * A new question, with its asker the first who is asking.
  * @throws Problem 404 for a channel or episode that is not visible, 422 against a rule, 429 after 60 in an hour
  */
-export async function askQuestion(actor: Actor, input: AskInput): Promise<QuestionView> {
+export async function askQuestion(
+  actor: Actor,
+  input: AskInput,
+  photos: readonly DrawnPhoto[] = [],
+): Promise<QuestionView> {
   const person = requirePerson(actor)
   const id = await inTransaction(async (transaction) => {
     const channel = await channelBySlug(input.channel)
@@ -74,6 +80,7 @@ export async function askQuestion(actor: Actor, input: AskInput): Promise<Questi
       { transaction },
     )
     await Asking.create({ questionId: question.id, userId: person.id }, { transaction })
+    await keepPhotos(question.id, photos, transaction)
     await leaveTrace(actor, question.id, { move: 'ask', from: null, to: 'new' }, transaction)
     await refreshQuestion(question.id, transaction)
     return question.id

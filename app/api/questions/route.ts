@@ -1,7 +1,8 @@
 import { created } from '@/lib/http/answers'
 import { endpoint } from '@/lib/http/endpoint'
+import { readAsking } from '@/lib/questions/read-asking'
 import { readQuestions } from '@/lib/questions/reads'
-import { askInput, questionOutput, questionPage, questionsQuery } from '@/lib/questions/schema'
+import { askForm, questionOutput, questionPage, questionsQuery } from '@/lib/questions/schema'
 import { askQuestion } from '@/lib/questions/writes'
 
 export const GET = endpoint(
@@ -10,9 +11,9 @@ export const GET = endpoint(
 )
 
 export const POST = endpoint(
-  { summary: 'Ask a question', input: askInput, output: questionOutput, creates: true },
-  async ({ actor, input }) => {
-    const question = await askQuestion(actor, input)
+  { summary: 'Ask a question', input: askForm, output: questionOutput, creates: true, read: readAsking },
+  async ({ actor, input: { input, photos } }) => {
+    const question = await askQuestion(actor, input, photos)
     return created(question, { location: `/api/questions/${question.id}`, edition: question.edition })
   },
 )
