@@ -1,9 +1,11 @@
 import '@/models/associations'
 import { chapterViews } from '@/lib/chapters/views'
 import { type LoadedEpisode, WITH_LINE } from '@/lib/episodes/line'
+import { weaveClaims } from '@/lib/handbook/rules'
 import { Answer } from '@/models/answer'
 import { CaptionTrack } from '@/models/caption-track'
 import type { Channel } from '@/models/channel'
+import type { Claim } from '@/models/claim'
 import { Cue } from '@/models/cue'
 import { Episode } from '@/models/episode'
 import { Explainer } from '@/models/explainer'
@@ -122,6 +124,12 @@ export async function documentsOfTerms(ids: readonly string[]): Promise<SearchDo
   })
 }
 
+type LoadedExplainer = Explainer & { claims: Claim[] }
+
+/** Documents of these explainers, the figures of their claims standing in the text as they are read. */
 export async function documentsOfExplainers(ids: readonly string[]): Promise<SearchDocument[]> {
-  return (await Explainer.findAll({ where: { id: [...ids] } })).map(explainerDocument)
+  const rows = (await Explainer.findAll({ where: { id: [...ids] }, include: ['claims'] })) as LoadedExplainer[]
+  return rows.map(({ id, title, summary, body, claims }) =>
+    explainerDocument({ id, title, summary, body: weaveClaims(body, claims) }),
+  )
 }

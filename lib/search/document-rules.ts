@@ -163,13 +163,13 @@ export const termDocument = ({ id, label, definition, names, crops }: TermFacts)
 
 export type ExplainerFacts = { id: string; title: string; summary: string; body: string }
 
-/** Markdown as the words that are read: no figures' tokens, no marks of emphasis, no addresses. */
+/** Markdown as the words that are read: no marks of emphasis, no addresses, no backslashes. */
 export function markdownWords(markdown: string): string {
   return markdown
-    .replace(/\{\{[^}]*\}\}/g, ' ')
-    .replace(/!?\[([^\]]*)\]\([^)]*\)/g, '$1')
+    .replace(/!?\[((?:\\.|[^\]\\])*)\]\([^)]*\)/g, '$1')
     .replace(/^\s*(#{1,6}|[-*+>]|\d+\.)\s+/gm, '')
-    .replace(/[*_`|]+/g, '')
+    .replace(/(?<!\\)[*_`|]+/g, '')
+    .replace(/\\([^\p{L}\p{N}\s])/gu, '$1')
 }
 
 export const explainerDocument = ({ id, title, summary, body }: ExplainerFacts): SearchDocument => ({

@@ -13,3 +13,11 @@ export async function lockIndex(how: 'shared' | 'alone', transaction: Transactio
   await db().query(`set local idle_in_transaction_session_timeout = '10min'`, { transaction })
   await db().query(`select ${call}($1)`, { bind: [INDEX_LOCK], transaction })
 }
+
+/**
+ * Held to the end of the transaction. Two refreshes of one thing follow each other, so that the one which read the
+ * older state cannot write last.
+ */
+export async function lockSource(source: string, transaction: Transaction): Promise<void> {
+  await db().query(`select pg_advisory_xact_lock($1, hashtext($2))`, { bind: [INDEX_LOCK, source], transaction })
+}

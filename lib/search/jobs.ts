@@ -10,4 +10,6 @@ export const searchSources = ['episode', 'question', 'term', 'explainer'] as con
 export const refreshSearch = defineJob('search.refresh', z.object({ kind: z.enum(searchSources), id: z.uuid() }), {
   retryLimit: 14,
   expireInSeconds: 120,
+  // A refresh mostly waits for the search; a handbook that is loaded brings dozens.
+  atOnce: 4,
 })

@@ -12,9 +12,6 @@ import type { FacetName, SearchQuery, SearchResult } from './schema'
 import { type FoundDocument, searchItemView } from './views'
 import { placesOf } from './visible-reads'
 
-/** After this a reader is better served by the plain search of the database. */
-const PATIENCE_MS = 3_000
-
 export const facetNames = Object.keys(facetAttributes) as FacetName[]
 
 const offsetOf = (cursor: string | undefined): number => {
@@ -46,10 +43,8 @@ const withOpenChoice = (query: SearchQuery, name: FacetName): MultiSearchQuery =
 
 async function ask(queries: MultiSearchQuery[]) {
   try {
-    const signal = AbortSignal.timeout(PATIENCE_MS)
-    return (
-      await services().search.multiSearch<{ queries: MultiSearchQuery[] }, SearchDocument>({ queries }, { signal })
-    ).results
+    const asked = services().search.multiSearch<{ queries: MultiSearchQuery[] }, SearchDocument>({ queries })
+    return (await asked).results
   } catch (failure) {
     // Down, slow, broken, without its index or with another key: for a reader it is all the same.
     if (!(failure instanceof MeilisearchError)) throw failure

@@ -3,7 +3,7 @@ import { db, inTransaction } from '@/lib/db'
 import { documentsOfEpisodes, documentsOfExplainers, documentsOfQuestions, documentsOfTerms } from './document-reads'
 import type { SearchDocument } from './document-rules'
 import { lockIndex } from './index-lock'
-import { replaceIndex } from './search-index'
+import { indexIsThere, replaceIndex } from './search-index'
 
 const AT_ONCE = 50
 
@@ -28,4 +28,11 @@ export const rebuildSearch = (): Promise<number> =>
   inTransaction(async (transaction) => {
     await lockIndex('alone', transaction)
     return replaceIndex(everything())
+  })
+
+/** Makes the index where there is none; of several that notice at once, one. */
+export const buildMissingSearch = (): Promise<void> =>
+  inTransaction(async (transaction) => {
+    await lockIndex('alone', transaction)
+    if (!(await indexIsThere())) await replaceIndex(everything())
   })

@@ -1,8 +1,8 @@
-import { QueryTypes } from 'sequelize'
+import { QueryTypes, type Transaction } from 'sequelize'
 import { db, inTransaction } from '@/lib/db'
 import { documentsOfEpisodes, documentsOfExplainers, documentsOfQuestions, documentsOfTerms } from './document-reads'
-import { lockIndex } from './index-lock'
-import { rebuildSearch } from './rebuild-search'
+import { lockIndex, lockSource } from './index-lock'
+import { buildMissingSearch } from './rebuild-search'
 import { indexIsThere, replaceDocuments } from './search-index'
 
 type Source = { kind: 'episode' | 'question' | 'term' | 'explainer'; id: string }
@@ -14,18 +14,20 @@ const documentsOf = {
   explainer: documentsOfExplainers,
 }
 
-/** What a question shows depends on the episodes it was asked on and answered by. */
+/** What a question shows depends on the episodes it was asked on and answered by. In one order for all, for the locks. */
 const questionsAround = (episodeId: string): Promise<{ id: string }[]> =>
   db().query<{ id: string }>(
     `select id from questions where episode_id = $1
-     union select question_id from answers where episode_id = $1`,
+     union select question_id from answers where episode_id = $1 order by id`,
     { bind: [episodeId], type: QueryTypes.SELECT },
   )
 
-async function refresh({ kind, id }: Source): Promise<void> {
-  await replaceDocuments(`${kind}-${id}`, await documentsOf[kind]([id]))
+async function refresh({ kind, id }: Source, transaction: Transaction): Promise<void> {
+  const source = `${kind}-${id}`
+  await lockSource(source, transaction)
+  await replaceDocuments(source, await documentsOf[kind]([id]))
   if (kind !== 'episode') return
-  for (const question of await questionsAround(id)) await refresh({ kind: 'question', id: question.id })
+  for (const question of await questionsAround(id)) await refresh({ kind: 'question', id: question.id }, transaction)
 }
 
 /**
@@ -35,11 +37,11 @@ async function refresh({ kind, id }: Source): Promise<void> {
  */
 export async function refreshSearchOf(source: Source): Promise<void> {
   if (!(await indexIsThere())) {
-    await rebuildSearch()
+    await buildMissingSearch()
     return
   }
   await inTransaction(async (transaction) => {
     await lockIndex('shared', transaction)
-    await refresh(source)
+    await refresh(source, transaction)
   })
 }

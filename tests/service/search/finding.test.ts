@@ -4,6 +4,7 @@ import { rebuildSearch } from '@/lib/search/rebuild-search'
 import type { SearchResult } from '@/lib/search/schema'
 import { Answer } from '@/models/answer'
 import type { Channel } from '@/models/channel'
+import { Claim } from '@/models/claim'
 import { Explainer } from '@/models/explainer'
 import { Season } from '@/models/season'
 import { Term } from '@/models/term'
@@ -76,10 +77,18 @@ beforeAll(async () => {
     field,
     synonyms: ['crowns'],
   })
-  await Explainer.create({
+  const heat = await Explainer.create({
     slug: 'heat-units',
     title: 'Counting heat units',
-    body: 'Add **each day** to the [sum](https://x.example).',
+    body: 'Add **each day** above {{claim:base}} to the [sum](https://x.example).',
+  })
+  await Claim.create({
+    explainerId: heat.id,
+    key: 'base',
+    statement: 'Maize counts from here.',
+    low: 50,
+    high: 50,
+    unit: '°F',
   })
   await rebuildSearch()
 })
@@ -136,7 +145,10 @@ describe('words', () => {
       url: '/handbook/terms/crown',
     })
     const [explainer] = (await search('q=heat+units&kind=explainer')).items
-    expect(explainer).toMatchObject({ url: '/handbook/explainers/heat-units', snippet: 'Add each day to the sum.' })
+    expect(explainer).toMatchObject({
+      url: '/handbook/explainers/heat-units',
+      snippet: 'Add each day above 50 °F to the sum.',
+    })
   })
 })
 

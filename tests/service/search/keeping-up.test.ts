@@ -153,9 +153,19 @@ it('a change to a search without its index makes the whole index', async () => {
   const client = new Meilisearch({ host: env().SEARCH_URL, apiKey: env().SEARCH_KEY })
   await client.deleteIndex(INDEX).waitTask()
   expect((await ask('q=concave')).status).toBe(503)
-  const term = { kind: 'term', id: crypto.randomUUID() } as const
-  await refreshSearchOf(term)
+  const changes = [1, 2, 3].map(() => refreshSearchOf({ kind: 'term', id: crypto.randomUUID() }))
+  await Promise.all(changes)
   expect(await titles('q=concave')).toEqual(['Setting the combine, chapter'])
+})
+
+it('two changes of one thing at once leave the later one', async () => {
+  const question = await makeQuestion(channel, owner, { title: 'Sprocket one?' })
+  const source = { kind: 'question', id: question.id } as const
+  const first = refreshSearchOf(source)
+  await question.update({ title: 'Sprocket two?' })
+  await Promise.all([first, refreshSearchOf(source), refreshSearchOf(source)])
+  const client = new Meilisearch({ host: env().SEARCH_URL, apiKey: env().SEARCH_KEY })
+  expect(await client.index(INDEX).getDocument(`question-${question.id}`)).toMatchObject({ title: 'Sprocket two?' })
 })
 
 it('a task that the search accepts and then fails makes the job fail, so that it is tried again', async () => {

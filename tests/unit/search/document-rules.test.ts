@@ -86,9 +86,10 @@ it('a question is filed under its crop even without a stage', () => {
 })
 
 it('markdown is searched as it is read', () => {
-  const body = '## Why\n\n- Add **each** {{claim:day}} to the [sum](https://x.example)\n1. `Then` _stop_'
+  const body =
+    '## Why\n\n- Add **each** [11.24\\_a \\[b\\]](#claim-x) to the [sum](https://x.example)\n1. `Then` _stop_'
   expect(explainerDocument({ id: 'x', title: 'T', summary: 'S', body }).text).toBe(
-    'S Why Add each to the sum Then stop',
+    'S Why Add each 11.24_a [b] to the sum Then stop',
   )
   expect(markdownWords('a * b')).toBe('a  b')
 })
