@@ -3,7 +3,7 @@
 import { chapterAt } from '@/lib/captions/rules'
 import { useMoment } from './playback-context'
 import { PinMark } from './pin-mark'
-import type { RowChapter, RowReading } from './row-rules'
+import { readingParts, type RowChapter, type RowReading } from './row-rules'
 import { TimeLink } from './time-link'
 
 type ReadingsPanelProps = { readings: RowReading[]; chapters: RowChapter[] }
@@ -37,7 +37,7 @@ export function ReadingsPanel({ readings, chapters }: ReadingsPanelProps) {
               <li key={reading.at} className="flex gap-3 py-1">
                 <TimeLink at={reading.at} className="min-w-10" />
                 <span className="min-w-0">
-                  {figureOf(reading)} {restOf(reading)}
+                  {readingParts(reading).figure} {readingParts(reading).words}
                 </span>
               </li>
             ))}
@@ -49,26 +49,18 @@ export function ReadingsPanel({ readings, chapters }: ReadingsPanelProps) {
 }
 
 function LargeReading({ reading }: { reading: RowReading }) {
+  const { figure, words } = readingParts(reading)
   return (
     <div className="flex items-start gap-1">
       <PinMark kind="reading" className="mt-0.5 -ml-2" />
       <div className="grid min-w-0 grid-cols-[auto_minmax(0,1fr)] items-baseline gap-x-3.5">
-        <span className="font-display text-[1.6875rem] leading-none font-semibold whitespace-nowrap">
-          {figureOf(reading)}
-        </span>
+        <span className="font-display text-[1.6875rem] leading-none font-semibold whitespace-nowrap">{figure}</span>
         <span className="min-w-0">
-          {restOf(reading)}
+          {words}
+          {reading.note && `, ${reading.note}`}
           <TimeLink at={reading.at} className="ml-2 text-sm" />
         </span>
       </div>
     </div>
   )
 }
-
-/** A sign such as °F or % stands with its figure; a unit in words reads on behind it. */
-const isSign = (unit: string) => unit.length <= 3
-
-const figureOf = ({ value, unit }: RowReading) => (isSign(unit) ? `${value}\u00a0${unit}` : String(value))
-
-const restOf = ({ unit, quantity, note }: RowReading) =>
-  [isSign(unit) ? quantity : `${unit}, ${quantity}`, note].filter(Boolean).join(', ')

@@ -29,8 +29,22 @@ export type Pin = {
 
 type PinSources = { readings: RowReading[]; questions: RowQuestion[]; corrections: RowCorrection[] }
 
-/** `31 °F, soil at crown depth`: figure and unit first, then what was measured. */
-export const readingWords = ({ value, unit, quantity }: RowReading) => `${value} ${unit}, ${quantity}`
+const inFigures = new Intl.NumberFormat('en-US', { maximumFractionDigits: 6 })
+
+/**
+ * A reading as a figure to be set large and the words beside it: `31 °F` and `soil at crown depth`, `19` and `plants per
+ * square foot`. A short sign stands with its figure, on one line (NIST SP 811, 7.2 asks for the space).
+ */
+export function readingParts({ value, unit, quantity }: RowReading): { figure: string; words: string } {
+  const figure = inFigures.format(value)
+  if (unit.length <= 3) return { figure: `${figure}\u00a0${unit}`, words: quantity }
+  return { figure, words: unit.startsWith('per ') ? `${quantity} ${unit}` : `${unit}, ${quantity}` }
+}
+
+function readingWords(reading: RowReading): string {
+  const { figure, words } = readingParts(reading)
+  return `${figure} ${words}`
+}
 
 /** `episode 11, 2:05`, the place an answer is given. */
 export const followUpPlace = ({ number, start }: { number: number; start: number }) =>

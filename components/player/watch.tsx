@@ -70,7 +70,7 @@ export function Watch({ episode, spoken, notes, askName, openAt }: WatchProps) {
         {published && (
           <div
             data-sticks="foot"
-            className="sticky bottom-0 z-20 order-7 border-t border-rule bg-sheet px-3.5 py-2.5 lg:hidden print:hidden"
+            className="bottom-0 z-20 order-7 border-t border-rule bg-sheet px-3.5 py-2.5 lg:hidden print:hidden [@media(min-height:36em)]:sticky"
           >
             <AskHere episodeId={episode.id} askName={askName} className="w-full" />
           </div>

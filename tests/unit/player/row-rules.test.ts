@@ -1,6 +1,6 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
-import { lanesOf, pinSize, pinsOf, placeWords, rowShare, turningPin } from '@/components/player/row-rules'
+import { lanesOf, pinSize, pinsOf, placeWords, readingParts, rowShare, turningPin } from '@/components/player/row-rules'
 
 const chapters = [
   { start: 0, end: 160, title: 'Why we count now', stage: null },
@@ -36,6 +36,16 @@ describe('the row in words', () => {
   })
 })
 
+describe('a reading', () => {
+  it.each([
+    [31, '°F', 'soil at crown depth', '31\u00a0°F', 'soil at crown depth'],
+    [827640, 'per acre', 'plants', '827,640', 'plants per acre'],
+    [2.5, 'inches', 'depth wetted', '2.5', 'inches, depth wetted'],
+  ])('of %d %s of %s', (value, unit, quantity, figure, words) => {
+    expect(readingParts({ at: 0, value, unit, quantity, note: null })).toEqual({ figure, words })
+  })
+})
+
 describe('pins', () => {
   const pins = pinsOf({
     readings: [{ at: 188, quantity: 'soil at crown depth', value: 31, unit: '°F', note: null }],
@@ -54,7 +64,7 @@ describe('pins', () => {
   it('have names that say what they are, when and how they stand', () => {
     expect(pins.map((pin) => pin.name)).toEqual([
       'Question at 2:00: Question a? Answered in episode 11, 2:05',
-      'Reading at 3:08: 31 °F, soil at crown depth',
+      'Reading at 3:08: 31\u00a0°F soil at crown depth',
       'Question at 3:20: Question b? Waiting for an answer',
       'Correction at 5:00: twelve',
     ])

@@ -75,7 +75,7 @@ describe('the row', () => {
 
   it('has a named button for each pin that opens its second', () => {
     const { place, playback } = draw()
-    click(one(place, 'button[aria-label="Reading at 1:12: 31 °F, soil at crown depth"]'))
+    click(one(place, 'button[aria-label="Reading at 1:12: 31\u00a0°F soil at crown depth"]'))
     expect(playback.read().at).toBe(72)
   })
 
