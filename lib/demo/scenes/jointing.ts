@@ -7,8 +7,8 @@ import { roots, stem } from './plants'
 export const firstNode: Scene = ({ t, line, since }) => {
   const risen = line === 0 ? 0.2 + ramp(t, 1, 4) * 0.3 : line === 1 ? 0.5 + 0.5 * ramp(since, 0, 4) : 1
   const node = 560 - 190 * risen
-  const wall = path('M540 560Q530 300 560 40H720Q750 300 740 560Q700 610 640 610T540 560Z', { fill: ink.leaf })
-  const hollow = path('M592 560Q586 300 606 40H674Q694 300 688 560Q660 580 640 580T592 560Z', { fill: '#e9efd3' })
+  const wall = path('M540 560Q530 270 556 -20H724Q750 270 740 560Q700 610 640 610T540 560Z', { fill: ink.leaf })
+  const hollow = path('M592 560Q586 270 602 -20H678Q694 270 688 560Q660 580 640 580T592 560Z', { fill: '#e9efd3' })
   const plate = (y: number, colour: string) =>
     path(`M590 ${y - 13}Q640 ${y - 25} 690 ${y - 13}V${y + 13}Q640 ${y + 2} 590 ${y + 13}Z`, { fill: colour })
   const young = at(
@@ -29,10 +29,10 @@ export const firstNode: Scene = ({ t, line, since }) => {
       ),
   )
   const reach = line >= 1 ? stroke(`M770 560V370M754 560H786M754 370H786`, ink.mark, 5) + label(936, 420, '1 cm') : ''
-  const side = stroke(
-    `M552 430Q430 360 ${360 + sway(t, 3) * 6} 180M732 380Q860 300 ${760 + sway(t, 3, 0.3) * 5} 150`,
-    ink.leafDark,
-    26,
+  const wind = sway(t, 3) * 8
+  const side = path(
+    `M546 380Q450 250 ${340 + wind} 130Q410 320 542 450ZM732 300Q770 190 ${768 - wind} 60Q806 220 736 380Z`,
+    { fill: ink.leafDark },
   )
   return (
     close() +

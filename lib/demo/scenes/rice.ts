@@ -5,8 +5,8 @@ import { panicle, panicleLength, roots } from './plants'
 
 /** A split stem: the ring of green at its foot, then the panicle of two millimetres. */
 export const greenRingScene: Scene = ({ t, line, since }) => {
-  const wall = path('M520 640Q500 360 560 60H720Q780 360 760 640Q700 690 640 690T520 640Z', { fill: ink.leaf })
-  const inner = path('M574 620Q562 360 604 60H676Q718 360 706 620Q670 648 640 648T574 620Z', { fill: '#eef0d8' })
+  const wall = path('M520 640Q500 320 552 -20H728Q780 320 760 640Q700 690 640 690T520 640Z', { fill: ink.leaf })
+  const inner = path('M574 620Q562 320 598 -20H682Q718 320 706 620Q670 648 640 648T574 620Z', { fill: '#eef0d8' })
   const pulse = line === 0 ? 0.4 + 0.6 * Math.abs(sway(t, 2)) : 1
   const ring = path('M572 560Q640 532 708 560V582Q640 554 572 582Z', {
     fill: '#6faa4a',
@@ -24,10 +24,10 @@ export const greenRingScene: Scene = ({ t, line, since }) => {
         )
       : ''
   const plates = stroke('M574 600Q640 574 706 600', ink.leafDark, 9)
-  const leaves = stroke(
-    `M530 420Q420 300 ${350 + sway(t, 3) * 6} 120M752 380Q860 260 ${940 - sway(t, 3) * 6} 130`,
-    ink.leafDark,
-    26,
+  const wind = sway(t, 3) * 8
+  const leaves = path(
+    `M526 360Q440 230 ${330 + wind} 96Q392 300 522 450ZM752 330Q840 220 ${952 - wind} 110Q886 280 758 420Z`,
+    { fill: ink.leafDark },
   )
   const arrow = line === 0 ? stroke('M900 570H740M764 548L738 570L764 592', ink.mark, 8) : ''
   return (

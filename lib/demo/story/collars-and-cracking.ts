@@ -1,7 +1,7 @@
 import type { StoryEpisode } from './types'
 
 // Figures: 80/55 °F give 17.5 and 90/65 °F give 25.5 heat units (Purdue's modified 86/50 method); emergence takes about
-// 115, each collar to the tenth 82, so 785 is (785 - 115) / 82 = 8.2 collars. Handbook C2, C3.
+// 115, each collar to the tenth 82, so 785 is (785 - 115) / 82 = 8.2 collars.
 export const collarsAndCracking: StoryEpisode = {
   key: 'collars-and-cracking',
   channel: 'alder-fork',

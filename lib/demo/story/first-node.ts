@@ -1,7 +1,7 @@
 import type { StoryEpisode } from './types'
 
 // Figures: first node at least 1 cm above the tillering node (BBCH 31, Meier 2001). A circle of one square foot is
-// 2·sqrt(144/π) = 13.5 in across; a square foot of 7.5 in rows is 144 / 7.5 = 19.2 in of row. Handbook C1, G.
+// 2·sqrt(144/π) = 13.5 in across; a square foot of 7.5 in rows is 144 / 7.5 = 19.2 in of row.
 export const firstNode: StoryEpisode = {
   key: 'first-node',
   channel: 'alder-fork',

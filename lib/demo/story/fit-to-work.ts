@@ -1,7 +1,7 @@
 import type { StoryEpisode } from './types'
 
 // Figures: plastic limit thread of 3 mm (ASTM D4318) and silt loam field capacity 30.5 % (Saxton & Rawls 2006),
-// so 25 mm of rain on soil at 18 % wets 25 / (0.305 - 0.18) = 200 mm. See handbook parts A2, A4, B3.
+// so 25 mm of rain on soil at 18 % wets 25 / (0.305 - 0.18) = 200 mm.
 export const fitToWork: StoryEpisode = {
   key: 'fit-to-work',
   channel: 'alder-fork',

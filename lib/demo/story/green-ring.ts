@@ -1,7 +1,7 @@
 import type { StoryEpisode } from './types'
 
 // Figures: rice BBCH 30 green ring, 32 panicle 1-2 mm, 45 late boot, 55 half headed, 65 full flower (Meier 2001);
-// DD50 with caps 94/70 gives 32 for 95/75 °F, its daily ceiling, and 29 for 88/70. Handbook C1, C3.
+// DD50 with caps 94/70 gives 32 for 95/75 °F, its daily ceiling, and 29 for 88/70.
 export const greenRing: StoryEpisode = {
   key: 'green-ring',
   channel: 'terrace-nine',

@@ -1,6 +1,6 @@
 import type { StoryEpisode } from './types'
 
-// Figures: soak 24-36 h and drain 24-36 h; 15-20 plants wanted from 30 seeds per square foot. Handbook E, H, C1.
+// Figures: soak 24-36 h and drain 24-36 h; 15-20 plants wanted from 30 seeds per square foot.
 export const levelAndFlooded: StoryEpisode = {
   key: 'level-and-flooded',
   channel: 'terrace-nine',

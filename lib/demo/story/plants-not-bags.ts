@@ -1,7 +1,7 @@
 import type { StoryEpisode } from './types'
 
 // Figures: 30 plants/ft2, TKW 38 g, survival 0.94 (97 % germination less 3 % loss) give 121 lb/ac by the rule of ten
-// and 116.5 exactly, because the exact divisor is 10.413. Wheat emerges at about 270 °F heat units. Handbook C3, E.
+// and 116.5 exactly, because the exact divisor is 10.413. Wheat emerges at about 270 °F heat units.
 export const plantsNotBags: StoryEpisode = {
   key: 'plants-not-bags',
   channel: 'alder-fork',

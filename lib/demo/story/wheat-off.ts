@@ -1,7 +1,7 @@
 import type { StoryEpisode } from './types'
 
 // Figures: drying 20 % to 15 % wet basis shrinks 5 · 100 / 85 = 5.88 %; wheat weighs 60 lb a bushel, its usual standard
-// moisture is 13.5 %. Cautions on bins: 29 CFR 1910.272(g). Handbook F, H.
+// moisture is 13.5 %. Cautions on bins: 29 CFR 1910.272(g).
 export const wheatOff: StoryEpisode = {
   key: 'wheat-off',
   channel: 'alder-fork',

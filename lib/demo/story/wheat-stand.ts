@@ -1,6 +1,6 @@
 import type { StoryEpisode } from './types'
 
-// Figures: an acre is 43,560 square feet (handbook G), so 19 plants per square foot are 827,640 plants per acre.
+// Figures: an acre is 43,560 square feet, so 19 plants per square foot are 827,640 plants per acre.
 export const wheatStand: StoryEpisode = {
   key: 'wheat-stand',
   channel: 'alder-fork',
