@@ -1,29 +1,22 @@
+import { mustBeInstallable } from './debian.mjs'
 import { House, Stopped } from './house.mjs'
 import { sweepLeftovers } from './leftovers.mjs'
 import { lockFolder } from './lock.mjs'
 import { mustHaveRoom, portsMustBeFree } from './preflight.mjs'
-import { prepareBuild, prepareDatabase, prepareDemo, prepareMachine, prepareSchema } from './prepare.mjs'
-import { serversFor } from './servers.mjs'
+import { lackingPackages, prepare } from './prepare.mjs'
+import { startProduct } from './product.mjs'
 import { loadEnvFile, settingsFrom } from './settings.mjs'
 import { firstSignal } from './signals.mjs'
-import { together } from './together.mjs'
 import { sentenceFor } from './trouble.mjs'
 import { welcome } from './welcome.mjs'
 
-/** Prepares whatever is missing, then starts every server. `mode` is start or dev; dev builds nothing beforehand. */
+/** Prepares whatever is missing, then starts every server. Dev builds nothing beforehand. */
 async function bringUp(house, settings, mode) {
   const since = performance.now()
   await portsMustBeFree(settings)
-  await prepareMachine(house, settings)
-  const env = await prepareDatabase(house, settings, process.env)
-  const start = (server) => () =>
-    house.step(`Starting the ${server.name}`, () => house.startServer(server, { root: settings.root, env }))
-  const { standIns, worker, web } = serversFor({ ...settings, mode })
-  await together(() => prepareSchema(house, settings, env), ...standIns.map(start))
-  if (mode === 'start') await prepareBuild(house, settings, env)
-  // The demo writes letters and search entries, and the worker would take up its films before they are whole.
-  await prepareDemo(house, settings, env)
-  await together(start(worker), start(web))
+  await mustBeInstallable(lackingPackages(settings))
+  const env = await prepare(house, settings, process.env, { wantsBuild: mode === 'start' })
+  await startProduct(house, settings, env, mode)
   console.log(welcome(settings, ((performance.now() - since) / 1000).toFixed(1)))
 }
 

@@ -40,7 +40,9 @@ async function rootPrefix() {
   return null
 }
 
-async function mustBeInstallable(missing) {
+/** How root's work is called here; null where nothing is missing. Throws one sentence where it cannot be called. */
+export async function mustBeInstallable(missing) {
+  if (missing.length === 0) return null
   const list = missing.join(' ')
   if (!hasProgram('apt-get'))
     throw new Trouble(`These programs are missing and this is no Debian machine to install them on: ${list}.`)

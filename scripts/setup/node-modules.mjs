@@ -1,4 +1,4 @@
-import { statSync } from 'node:fs'
+import { readFileSync, statSync } from 'node:fs'
 import path from 'node:path'
 import { mustRun } from './run.mjs'
 
@@ -8,8 +8,18 @@ const changedAt = (file) => statSync(file, { throwIfNoEntry: false })?.mtimeMs ?
 export const modulesAreStale = (root) =>
   changedAt(path.join(root, 'node_modules/.package-lock.json')) < changedAt(path.join(root, 'package-lock.json'))
 
+/** Turns npm's lines on its downloads into "310 of about 840 packages". */
+function fetchedSoFar(root, say) {
+  const { packages } = JSON.parse(readFileSync(path.join(root, 'package-lock.json'), 'utf8'))
+  let fetched = 0
+  return (text) => {
+    fetched += text.match(/^npm http (fetch|cache) .*\.tgz/gm)?.length ?? 0
+    if (fetched > 0) say(`${fetched} of about ${Object.keys(packages).length - 1} packages`)
+  }
+}
+
 /** Installs exactly what the lock file says; the build tools too, whatever NODE_ENV says. */
 export async function installModules(root, say) {
   const flags = ['ci', '--include=dev', '--no-audit', '--no-fund', '--loglevel=http']
-  await mustRun('npm', flags, { cwd: root, onText: say })
+  await mustRun('npm', flags, { cwd: root, onText: fetchedSoFar(root, say) })
 }

@@ -7,20 +7,23 @@ import { mustRun } from './run.mjs'
 import { secretsIn } from './secrets.mjs'
 import { environmentFor } from './settings.mjs'
 import { build, buildIsStale } from './sources.mjs'
+import { together } from './together.mjs'
 
-/** Debian packages and node_modules, each only where missing or stale. */
-export async function prepareMachine(house, { root, owns, demo }, extraPackages = []) {
-  const wanted = [
+/** The Debian packages that this start needs and that are not here. */
+export const lackingPackages = ({ owns, demo }, extra = []) =>
+  missingPackages([
     'ffmpeg',
     'bubblewrap',
     ...(owns.database ? ['postgresql'] : []),
     ...(demo ? ['flite'] : []),
-    ...extraPackages,
-  ]
-  const missing = missingPackages(wanted)
+    ...extra,
+  ])
+
+/** Debian packages, only where some are missing. */
+async function preparePackages(house, settings, extra) {
+  const missing = lackingPackages(settings, extra)
   if (missing.length > 0)
     await house.step(`Installing Debian packages: ${missing.join(', ')}`, (say) => installPackages(missing, say))
-  if (modulesAreStale(root)) await house.step('Installing node_modules (npm ci)', (say) => installModules(root, say))
 }
 
 /** The database's address: the one that was given, or our own cluster's, which is then kept alive and ended with the house. */
@@ -38,28 +41,56 @@ async function openDatabase(house, { dataDir, databasePort, owns, durable = true
 export const runScript = (root, env, file, say) =>
   mustRun(process.execPath, ['--import', 'tsx', path.join(root, file)], { cwd: root, env, onText: say })
 
-/** The database is there. @returns the environment for every part of the product */
-export async function prepareDatabase(house, settings, from) {
-  const url = await openDatabase(house, settings, from)
+/** node_modules, only where missing or older than the lock file. */
+async function prepareModules(house, { root }) {
+  if (modulesAreStale(root)) await house.step('Installing node_modules (npm ci)', (say) => installModules(root, say))
+}
+
+/**
+ * The pages, built again only where their sources changed.
+ * A page that asked the database while it is built would show that moment for ever: there it finds none.
+ */
+export async function prepareBuild(house, settings, from) {
+  const { root, distDir, dataDir } = settings
+  if (!buildIsStale(root, distDir)) return
+  const env = environmentFor(settings, from, 'postgres://nobody@127.0.0.1:9/none', secretsIn(dataDir))
+  await house.step('Building the pages', (say) => build(root, distDir, env, say))
+}
+
+/**
+ * Everything that must be there before a server starts, each only where missing or stale: Debian packages and the database
+ * on one side, node_modules and the built pages on the other, side by side because neither needs the other.
+ * @returns the environment for every part of the product
+ */
+export async function prepare(house, settings, from, { wantsBuild, wantsDatabase = true, packages = [] }) {
+  const [url] = await together(
+    async () => {
+      await preparePackages(house, settings, packages)
+      return wantsDatabase ? openDatabase(house, settings, from) : undefined
+    },
+    async () => {
+      await prepareModules(house, settings)
+      if (wantsBuild) await prepareBuild(house, settings, from)
+    },
+  )
   return environmentFor(settings, from, url, secretsIn(settings.dataDir))
 }
 
-/** Migrations, queues and the shipped handbook; run on every start, for a restored database may be an older one. */
+/** Migrations and queues; run on every start, for a restored database may be an older one. */
 export const prepareSchema = (house, { root }, env) =>
-  house.step('Bringing the database up to date', async (say) => {
-    await runScript(root, env, 'scripts/migrate.ts', say)
-    await runScript(root, env, 'scripts/load-handbook.ts', say)
-  })
+  house.step('Bringing the database up to date', (say) => runScript(root, env, 'scripts/migrate.ts', say))
 
-/** The demo, once: the note is written last, so a seeding that was cut off is run again. */
-export async function prepareDemo(house, { root, dataDir, demo }, env) {
-  const note = path.join(dataDir, 'demo.json')
-  if (!demo || existsSync(note)) return
-  await house.step('Filling in the demo (first start only)', (say) => runScript(root, env, 'scripts/seed.ts', say))
-  writeFileSync(note, JSON.stringify({ seededAt: new Date().toISOString() }))
-}
+/** The handbook as shipped, where it changed; what people wrote stays theirs. */
+export const prepareHandbook = (house, { root }, env) =>
+  house.step('Bringing the handbook up to date', (say) => runScript(root, env, 'scripts/load-handbook.ts', say))
 
-/** The pages, built again only where their sources changed. */
-export async function prepareBuild(house, { root, distDir }, env) {
-  if (buildIsStale(root, distDir)) await house.step('Building the pages', (say) => build(root, distDir, env, say))
+/**
+ * The demo, once. The note is written last, so a seeding that was cut off is run again,
+ * and lies with the database, so a new database gets its demo.
+ */
+export async function prepareDemo(house, { root, dataDir, demo, owns }, env) {
+  const note = path.join(dataDir, 'postgres', 'demo.json')
+  if (!demo || (owns.database && existsSync(note))) return
+  await house.step('Filling in the demo', (say) => runScript(root, env, 'scripts/seed.ts', say))
+  if (owns.database) writeFileSync(note, JSON.stringify({ seededAt: new Date().toISOString() }))
 }

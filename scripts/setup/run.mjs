@@ -2,6 +2,7 @@ import { spawn } from 'node:child_process'
 import { Trouble } from './trouble.mjs'
 
 const running = new Map()
+const patience = 10_000
 
 /**
  * Runs a program to its end and collects what it said.
@@ -42,11 +43,18 @@ export async function mustRun(command, args, options) {
   throw new Trouble(`${command} ${args.slice(0, 3).join(' ')} ended with ${ended.signal ?? ended.status}:\n${words}`)
 }
 
-/** Ends every program that still runs, group by group; what must not be cut is left alone unless forced. */
+/**
+ * Asks every program that still runs to end, group by group, and kills after a while what takes too long over it
+ * (npm first takes back what it had unpacked). What must not be cut is waited for, unless forced.
+ */
 export function endRunning({ force = false } = {}) {
   for (const [child, toTheEnd] of running) {
     if (toTheEnd && !force) console.log('  waiting for the package installation, which must not be cut …')
-    else endGroup(child.pid, force ? 'SIGKILL' : 'SIGTERM')
+    else if (force) endGroup(child.pid, 'SIGKILL')
+    else {
+      endGroup(child.pid, 'SIGTERM')
+      setTimeout(() => running.has(child) && endGroup(child.pid, 'SIGKILL'), patience).unref()
+    }
   }
 }
 

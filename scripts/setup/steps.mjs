@@ -16,9 +16,9 @@ const tail = (text) =>
  */
 export async function step(title, work) {
   const since = performance.now()
-  let detail = ''
+  let detail = 'at work'
   console.log(`· ${title}`)
-  const pulse = setInterval(() => console.log(`  … ${seconds(since)}  ${detail}`.trimEnd()), quiet)
+  const pulse = setInterval(() => console.log(`  … ${title.split(':')[0]}, ${seconds(since)}: ${detail}`), quiet)
   try {
     const answer = await work((text) => (detail = tail(text) || detail))
     console.log(`✓ ${title} (${seconds(since)})`)

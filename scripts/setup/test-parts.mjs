@@ -34,7 +34,7 @@ async function e2e(bench) {
 }
 
 /**
- * The parts of `npm test` in their order. `needs` says what must be there first: packages of Debian, a database, the whole product.
+ * The parts of `npm test` in their order. `needs` says what must be there first: a database, the built pages, the whole product, a browser.
  * `run` gets the bench { root, env, folder } and returns { passed, failed }.
  */
 export const parts = [
@@ -47,5 +47,6 @@ export const parts = [
   { name: 'unit', run: (bench) => vitest(bench, 'unit') },
   { name: 'service', needs: ['database'], run: (bench) => vitest(bench, 'service') },
   { name: 'media', run: (bench) => vitest(bench, 'media') },
-  { name: 'e2e', needs: ['database', 'product'], packages: ['chromium'], run: e2e },
+  { name: 'build', needs: ['build'], run: () => stepCounts(true) },
+  { name: 'e2e', needs: ['database', 'build', 'product', 'browser'], run: e2e },
 ]

@@ -1,15 +1,13 @@
 import { House, Stopped } from './house.mjs'
 import { lockFolder } from './lock.mjs'
 import { mustHaveRoom } from './preflight.mjs'
-import { prepareBuild, prepareDatabase, prepareDemo, prepareMachine, prepareSchema } from './prepare.mjs'
-import { serversFor } from './servers.mjs'
-import { secretsIn } from './secrets.mjs'
-import { environmentFor, root } from './settings.mjs'
+import { prepare, prepareBuild } from './prepare.mjs'
+import { startProduct } from './product.mjs'
+import { root } from './settings.mjs'
 import { firstSignal } from './signals.mjs'
 import { clearBench, clearDeadBenches, makeBench, testEnvironment } from './test-bench.mjs'
 import { closingLine, stepCounts, sumOf } from './test-counts.mjs'
 import { parts } from './test-parts.mjs'
-import { together } from './together.mjs'
 import { sentenceFor, Trouble } from './trouble.mjs'
 
 /** The parts asked for by name; none named means all. Throws Trouble for a name that is none. */
@@ -20,21 +18,12 @@ export function chooseParts(names) {
   return names.length === 0 ? parts : parts.filter((part) => names.includes(part.name))
 }
 
-async function startProduct(house, { settings }, env) {
-  await prepareBuild(house, settings, env)
-  const start = (server) => () =>
-    house.step(`Starting the ${server.name}`, () => house.startServer(server, { root, env }))
-  const { standIns, worker, web } = serversFor({ ...settings, mode: 'start' })
-  await together(() => prepareSchema(house, settings, env), ...standIns.map(start))
-  await prepareDemo(house, settings, env)
-  await together(start(worker), start(web))
-}
-
 /** One part with all it needs. Whatever keeps it from running is its failure, said in a sentence. */
 async function runPart(house, bench, part, ready) {
   console.log(`\n— ${part.name} —`)
   try {
-    if (part.needs?.includes('product')) ready.product ??= startProduct(house, bench, bench.env)
+    if (part.needs?.includes('build')) await prepareBuild(house, bench.settings, bench.outside)
+    if (part.needs?.includes('product')) ready.product ??= startProduct(house, bench.settings, bench.env, 'start')
     await ready.product
     if (house.stopping) throw new Stopped()
     return await part.run(bench)
@@ -45,12 +34,12 @@ async function runPart(house, bench, part, ready) {
 }
 
 async function runAll(house, bench, chosen) {
-  const packages = chosen.flatMap((part) => part.packages ?? [])
-  await prepareMachine(house, bench.settings, packages)
-  const wantsDatabase = chosen.some((part) => part.needs?.includes('database'))
-  const env = wantsDatabase
-    ? await prepareDatabase(house, bench.settings, bench.outside)
-    : environmentFor(bench.settings, bench.outside, undefined, secretsIn(bench.settings.dataDir))
+  const needs = new Set(chosen.flatMap((part) => part.needs ?? []))
+  const env = await prepare(house, bench.settings, bench.outside, {
+    wantsBuild: false,
+    wantsDatabase: needs.has('database'),
+    packages: needs.has('browser') ? ['chromium'] : [],
+  })
   bench.env = testEnvironment(bench, env)
   const [counts, ready] = [[], {}]
   for (const part of chosen) {

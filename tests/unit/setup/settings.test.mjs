@@ -91,6 +91,7 @@ it('runs the parts asked for in their own order and refuses a name that is none'
     'unit',
     'service',
     'media',
+    'build',
     'e2e',
   ])
   expect(() => chooseParts(['units'])).toThrow('There is no part "units"')
