@@ -16,8 +16,8 @@ async function bringUp(house, settings, mode) {
   await portsMustBeFree(settings)
   await mustBeInstallable(lackingPackages(settings))
   const env = await prepare(house, settings, process.env, { wantsBuild: mode === 'start' })
-  await startProduct(house, settings, env, mode)
-  console.log(welcome(settings, ((performance.now() - since) / 1000).toFixed(1)))
+  const { isNew } = await startProduct(house, settings, env, mode)
+  console.log(welcome({ ...settings, isNew }, ((performance.now() - since) / 1000).toFixed(1)))
 }
 
 /** One start from the first look to the last process ended. Sets the exit code; never rejects. */

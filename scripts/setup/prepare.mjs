@@ -86,11 +86,12 @@ export const prepareHandbook = (house, { root }, env) =>
 
 /**
  * The demo, once. The note is written last, so a seeding that was cut off is run again,
- * and lies with the database, so a new database gets its demo.
+ * and lies with the database, so a new database gets its demo. @returns whether it was filled in just now
  */
 export async function prepareDemo(house, { root, dataDir, demo, owns }, env) {
   const note = path.join(dataDir, 'postgres', 'demo.json')
-  if (!demo || (owns.database && existsSync(note))) return
+  if (!demo || (owns.database && existsSync(note))) return false
   await house.step('Filling in the demo', (say) => runScript(root, env, 'scripts/seed.ts', say))
   if (owns.database) writeFileSync(note, JSON.stringify({ seededAt: new Date().toISOString() }))
+  return true
 }

@@ -1,3 +1,4 @@
+import { waitForFilms } from './films.mjs'
 import { House, Stopped } from './house.mjs'
 import { lockFolder } from './lock.mjs'
 import { mustHaveRoom } from './preflight.mjs'
@@ -18,12 +19,17 @@ export function chooseParts(names) {
   return names.length === 0 ? parts : parts.filter((part) => names.includes(part.name))
 }
 
+async function startWithFilms(house, { settings, env }) {
+  await startProduct(house, settings, env, 'start')
+  await house.step('Waiting for the films of the demo', (say) => waitForFilms(house, settings.baseUrl, say))
+}
+
 /** One part with all it needs. Whatever keeps it from running is its failure, said in a sentence. */
 async function runPart(house, bench, part, ready) {
   console.log(`\n— ${part.name} —`)
   try {
     if (part.needs?.includes('build')) await prepareBuild(house, bench.settings, bench.outside)
-    if (part.needs?.includes('product')) ready.product ??= startProduct(house, bench.settings, bench.env, 'start')
+    if (part.needs?.includes('product')) ready.product ??= startWithFilms(house, bench)
     await ready.product
     if (house.stopping) throw new Stopped()
     return await part.run(bench)

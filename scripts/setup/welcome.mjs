@@ -8,7 +8,7 @@ const people = [
 ]
 
 /** What the person at the keyboard needs once everything is up. */
-export function welcome({ baseUrl, owns, mailPagePort, demo, dataDir }, seconds) {
+export function welcome({ baseUrl, owns, mailPagePort, demo, isNew, dataDir }, seconds) {
   const signIns = [
     '',
     'Demo sign-ins, password turnrow-demo-2026:',
@@ -18,6 +18,7 @@ export function welcome({ baseUrl, owns, mailPagePort, demo, dataDir }, seconds)
     '',
     `Turnrow is ready at ${baseUrl} (after ${seconds} s)`,
     ...(owns.mail ? [`Letters it sends are at http://localhost:${mailPagePort}`] : []),
+    ...(isNew ? ['The worker is drawing the films of the demo; they come in one by one.'] : []),
     `Logs are in ${dataDir}/logs`,
     ...(demo ? signIns : []),
     '',
