@@ -31,8 +31,7 @@ function ClaimNote({ claim }: { claim: ClaimView }) {
         {claimWords(claim)}
         {claim.checkedOn && (
           <>
-            {claim.checkedBy && `, says ${claim.checkedBy}`}
-            {', '}
+            {`. Held against it ${claim.checkedBy ? `by ${claim.checkedBy} ` : ''}on `}
             <time dateTime={claim.checkedOn}>{fullDay(claim.checkedOn)}</time>
           </>
         )}

@@ -5,9 +5,9 @@ import type { ExplainerLine } from '@/lib/handbook/views'
 /** The explainers with how far each was checked. */
 export function ExplainerRows({ explainers }: { explainers: ExplainerLine[] }) {
   return (
-    <ul className="sheet ruled">
+    <ul className="grid gap-px border border-rule bg-rule lg:grid-cols-2">
       {explainers.map((explainer) => (
-        <li key={explainer.slug} className="px-4 py-4 md:px-5">
+        <li key={explainer.slug} className="bg-sheet px-4 py-4 md:px-5">
           <h3>
             <Link href={explainer.url} className="text-ink no-underline hover:underline">
               {explainer.title}

@@ -13,11 +13,11 @@ export function TermFacts({ term }: { term: TermView }) {
   ]
   return (
     <div className="sheet px-4 py-4 md:px-5">
-      <dl className="grid gap-x-5 gap-y-2 sm:grid-cols-[8rem_1fr]">
+      <dl className="space-y-2">
         {facts.map(
           ([name, value]) =>
             value && (
-              <div key={name} className="contents">
+              <div key={name} className="gap-x-5 sm:grid sm:grid-cols-[8rem_1fr] sm:items-baseline">
                 <dt className="text-sm text-ink-3">{name}</dt>
                 <dd lang={name === 'In Spanish' ? 'es' : undefined}>{value}</dd>
               </div>

@@ -89,7 +89,7 @@ describe('a claim’s note', () => {
     'A leaflet',
     'Table 2',
     'Agrees with the publication',
-    'says an adviser',
+    'by an adviser on',
     '3 November 2026',
   ])('says “%s”', (part) => expect(words({})).toContain(part))
 

@@ -2,7 +2,7 @@ import type { ExplainerEntry } from '../../entries'
 import { opened, range, remembered, transcribed, value } from '../claim'
 
 const body = `
-A field looks dry before it is fit. Sun and wind take the shine off the top in a day while the layer that will carry the wheel and meet the tool is still soft. So the question is never "is it dry?" but "is it dry enough, as deep as I mean to work?"
+A field looks dry before it is fit. Sun and wind take the shine off the top in a day while the layer that will carry the wheel and meet the tool is still soft. So the question is never “is it dry?” but “is it dry enough, as deep as I mean to work?”
 
 ## What the plastic limit says
 

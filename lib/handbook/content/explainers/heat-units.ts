@@ -6,7 +6,7 @@ A crop does not read the calendar. It comes on with warmth, slowly in a cold spr
 
 ## One day, worked by hand
 
-Take the day's high and low, average them, and subtract the temperature below which the crop stands still. For maize in the United States that base is {{claim:corn-base}}, and there is a ceiling as well: warmth above {{claim:corn-ceiling}} no longer speeds the plant up. So before you average, raise a low that is under the base up to the base, and pull a high that is over the ceiling down to the ceiling. A day never counts as less than nothing.
+Take the day’s high and low, average them, and subtract the temperature below which the crop stands still. For maize in the United States that base is {{claim:corn-base}}, and there is a ceiling as well: warmth above {{claim:corn-ceiling}} no longer speeds the plant up. So before you average, raise a low that is under the base up to the base, and pull a high that is over the ceiling down to the ceiling. A day never counts as less than nothing.
 
 In the published example a high of {{claim:example-high}} and a low of {{claim:example-low}} give {{claim:example-day}}. A newspaper column works three spring days in a row, two of them with nights below the base, and gets {{claim:three-days}} for the three together. If your sum comes out lower you have forgotten to lift the nights.
 
