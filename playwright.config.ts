@@ -1,6 +1,10 @@
 import { defineConfig } from '@playwright/test'
 
-/** Drives the built product that `npm test` has brought up; its address comes in E2E_BASE_URL. */
+/**
+ * Drives the built product that `npm test` has brought up, with the demo in it and its films ready. It tells the tests
+ * E2E_BASE_URL, E2E_MAILBOX_URL (GET /messages), E2E_SEARCH_URL, DATABASE_URL and E2E_PIDS_FILE ({ web, worker, … }, for
+ * a kill -9 that is meant).
+ */
 export default defineConfig({
   testDir: 'tests/e2e',
   workers: 1,
