@@ -1,4 +1,5 @@
 import type { Metadata, Viewport } from 'next'
+import { connection } from 'next/server'
 import type { ReactNode } from 'react'
 import { Providers } from '@/components/frame/providers'
 import { fontVariables } from './fonts'
@@ -20,7 +21,9 @@ export const viewport: Viewport = {
   ],
 }
 
-export default function RootLayout({ children }: { children: ReactNode }) {
+export default async function RootLayout({ children }: { children: ReactNode }) {
+  // A page drawn beforehand has no nonce in its scripts, and the policy would stop every one of them.
+  await connection()
   return (
     <html lang="en" className={fontVariables}>
       <body className="flex min-h-dvh flex-col">

@@ -26,5 +26,5 @@ Answer.init(
     createdAt: { type: DataTypes.DATE, allowNull: false },
     updatedAt: { type: DataTypes.DATE, allowNull: false },
   },
-  { sequelize: db(), tableName: 'answers' },
+  { sequelize: db(), modelName: 'Answer', tableName: 'answers' },
 )

@@ -22,5 +22,5 @@ ApiToken.init(
     lastUsedAt: { type: DataTypes.DATE, allowNull: true },
     endedAt: { type: DataTypes.DATE, allowNull: true },
   },
-  { sequelize: db(), tableName: 'api_tokens', timestamps: true, updatedAt: false },
+  { sequelize: db(), modelName: 'ApiToken', tableName: 'api_tokens', timestamps: true, updatedAt: false },
 )

@@ -14,5 +14,5 @@ Asking.init(
     userId: { type: DataTypes.UUID, allowNull: false, primaryKey: true },
     createdAt: { type: DataTypes.DATE, allowNull: false },
   },
-  { sequelize: db(), tableName: 'askings', timestamps: true, updatedAt: false },
+  { sequelize: db(), modelName: 'Asking', tableName: 'askings', timestamps: true, updatedAt: false },
 )

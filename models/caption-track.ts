@@ -26,5 +26,5 @@ CaptionTrack.init(
     createdAt: { type: DataTypes.DATE, allowNull: false },
     updatedAt: { type: DataTypes.DATE, allowNull: false },
   },
-  { sequelize: db(), tableName: 'caption_tracks' },
+  { sequelize: db(), modelName: 'CaptionTrack', tableName: 'caption_tracks' },
 )

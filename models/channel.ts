@@ -22,5 +22,5 @@ Channel.init(
     createdAt: { type: DataTypes.DATE, allowNull: false },
     updatedAt: { type: DataTypes.DATE, allowNull: false },
   },
-  { sequelize: db(), tableName: 'channels' },
+  { sequelize: db(), modelName: 'Channel', tableName: 'channels' },
 )

@@ -12,5 +12,5 @@ ChapterTopic.init(
     chapterId: { type: DataTypes.UUID, allowNull: false, primaryKey: true },
     code: { type: DataTypes.TEXT, allowNull: false, primaryKey: true },
   },
-  { sequelize: db(), tableName: 'chapter_topics', timestamps: false },
+  { sequelize: db(), modelName: 'ChapterTopic', tableName: 'chapter_topics', timestamps: false },
 )

@@ -16,5 +16,5 @@ Chapter.init(
     startMs: { type: DataTypes.INTEGER, allowNull: false },
     title: { type: DataTypes.TEXT, allowNull: false },
   },
-  { sequelize: db(), tableName: 'chapters', timestamps: false },
+  { sequelize: db(), modelName: 'Chapter', tableName: 'chapters', timestamps: false },
 )

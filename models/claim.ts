@@ -42,5 +42,5 @@ Claim.init(
     checkedOn: { type: DataTypes.DATEONLY, allowNull: true },
     position: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 0 },
   },
-  { sequelize: db(), tableName: 'claims', timestamps: false },
+  { sequelize: db(), modelName: 'Claim', tableName: 'claims', timestamps: false },
 )

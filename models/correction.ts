@@ -22,5 +22,5 @@ Correction.init(
     createdBy: { type: DataTypes.UUID, allowNull: true },
     createdAt: { type: DataTypes.DATE, allowNull: false },
   },
-  { sequelize: db(), tableName: 'corrections', timestamps: true, updatedAt: false },
+  { sequelize: db(), modelName: 'Correction', tableName: 'corrections', timestamps: true, updatedAt: false },
 )

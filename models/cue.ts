@@ -26,5 +26,5 @@ Cue.init(
     speaker: { type: DataTypes.TEXT, allowNull: true },
     settings: { type: DataTypes.TEXT, allowNull: true },
   },
-  { sequelize: db(), tableName: 'cues', timestamps: false },
+  { sequelize: db(), modelName: 'Cue', tableName: 'cues', timestamps: false },
 )

@@ -48,5 +48,5 @@ Episode.init(
     createdAt: { type: DataTypes.DATE, allowNull: false },
     updatedAt: { type: DataTypes.DATE, allowNull: false },
   },
-  { sequelize: db(), tableName: 'episodes' },
+  { sequelize: db(), modelName: 'Episode', tableName: 'episodes' },
 )

@@ -36,5 +36,5 @@ Explainer.init(
     createdAt: { type: DataTypes.DATE, allowNull: false },
     updatedAt: { type: DataTypes.DATE, allowNull: false },
   },
-  { sequelize: db(), tableName: 'explainers' },
+  { sequelize: db(), modelName: 'Explainer', tableName: 'explainers' },
 )

@@ -50,5 +50,5 @@ Footage.init(
     createdAt: { type: DataTypes.DATE, allowNull: false },
     updatedAt: { type: DataTypes.DATE, allowNull: false },
   },
-  { sequelize: db(), tableName: 'footages' },
+  { sequelize: db(), modelName: 'Footage', tableName: 'footages' },
 )

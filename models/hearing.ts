@@ -16,5 +16,5 @@ Hearing.init(
     atMs: { type: DataTypes.INTEGER, allowNull: false, primaryKey: true },
     text: { type: DataTypes.TEXT, allowNull: false },
   },
-  { sequelize: db(), tableName: 'hearings', timestamps: false },
+  { sequelize: db(), modelName: 'Hearing', tableName: 'hearings', timestamps: false },
 )

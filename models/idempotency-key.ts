@@ -22,5 +22,5 @@ IdempotencyKey.init(
     body: { type: DataTypes.JSONB, allowNull: true },
     createdAt: { type: DataTypes.DATE, allowNull: false },
   },
-  { sequelize: db(), tableName: 'idempotency_keys', timestamps: true, updatedAt: false },
+  { sequelize: db(), modelName: 'IdempotencyKey', tableName: 'idempotency_keys', timestamps: true, updatedAt: false },
 )

@@ -26,5 +26,5 @@ Invitation.init(
     acceptedAt: { type: DataTypes.DATE, allowNull: true },
     createdAt: { type: DataTypes.DATE, allowNull: false },
   },
-  { sequelize: db(), tableName: 'invitations', timestamps: true, updatedAt: false },
+  { sequelize: db(), modelName: 'Invitation', tableName: 'invitations', timestamps: true, updatedAt: false },
 )

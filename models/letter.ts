@@ -34,5 +34,5 @@ Letter.init(
     sentAt: { type: DataTypes.DATE, allowNull: true },
     createdAt: { type: DataTypes.DATE, allowNull: false },
   },
-  { sequelize: db(), tableName: 'letters', timestamps: true, updatedAt: false },
+  { sequelize: db(), modelName: 'Letter', tableName: 'letters', timestamps: true, updatedAt: false },
 )

@@ -14,5 +14,5 @@ Mark.init(
     value: { type: DataTypes.JSONB, allowNull: false },
     setAt: { type: DataTypes.DATE, allowNull: false, defaultValue: DataTypes.NOW },
   },
-  { sequelize: db(), tableName: 'marks', timestamps: false },
+  { sequelize: db(), modelName: 'Mark', tableName: 'marks', timestamps: false },
 )

@@ -16,5 +16,5 @@ Membership.init(
     role: { type: DataTypes.TEXT, allowNull: false },
     createdAt: { type: DataTypes.DATE, allowNull: false },
   },
-  { sequelize: db(), tableName: 'memberships', timestamps: true, updatedAt: false },
+  { sequelize: db(), modelName: 'Membership', tableName: 'memberships', timestamps: true, updatedAt: false },
 )

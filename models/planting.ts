@@ -24,5 +24,5 @@ Planting.init(
     createdAt: { type: DataTypes.DATE, allowNull: false },
     updatedAt: { type: DataTypes.DATE, allowNull: false },
   },
-  { sequelize: db(), tableName: 'plantings' },
+  { sequelize: db(), modelName: 'Planting', tableName: 'plantings' },
 )

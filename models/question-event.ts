@@ -24,5 +24,5 @@ QuestionEvent.init(
     detail: { type: DataTypes.TEXT, allowNull: true },
     createdAt: { type: DataTypes.DATE, allowNull: false },
   },
-  { sequelize: db(), tableName: 'question_events', timestamps: true, updatedAt: false },
+  { sequelize: db(), modelName: 'QuestionEvent', tableName: 'question_events', timestamps: true, updatedAt: false },
 )

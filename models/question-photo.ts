@@ -22,5 +22,5 @@ QuestionPhoto.init(
     alt: { type: DataTypes.TEXT, allowNull: false, defaultValue: '' },
     createdAt: { type: DataTypes.DATE, allowNull: false },
   },
-  { sequelize: db(), tableName: 'question_photos', timestamps: true, updatedAt: false },
+  { sequelize: db(), modelName: 'QuestionPhoto', tableName: 'question_photos', timestamps: true, updatedAt: false },
 )

@@ -42,5 +42,5 @@ Question.init(
     createdAt: { type: DataTypes.DATE, allowNull: false },
     updatedAt: { type: DataTypes.DATE, allowNull: false },
   },
-  { sequelize: db(), tableName: 'questions' },
+  { sequelize: db(), modelName: 'Question', tableName: 'questions' },
 )

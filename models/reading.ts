@@ -22,5 +22,5 @@ Reading.init(
     unit: { type: DataTypes.TEXT, allowNull: false },
     note: { type: DataTypes.TEXT, allowNull: true },
   },
-  { sequelize: db(), tableName: 'readings', timestamps: false },
+  { sequelize: db(), modelName: 'Reading', tableName: 'readings', timestamps: false },
 )

@@ -27,5 +27,5 @@ Rendition.init(
     },
     ready: { type: DataTypes.BOOLEAN, allowNull: false, defaultValue: false },
   },
-  { sequelize: db(), tableName: 'renditions', timestamps: false },
+  { sequelize: db(), modelName: 'Rendition', tableName: 'renditions', timestamps: false },
 )

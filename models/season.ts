@@ -20,5 +20,5 @@ Season.init(
     createdAt: { type: DataTypes.DATE, allowNull: false },
     updatedAt: { type: DataTypes.DATE, allowNull: false },
   },
-  { sequelize: db(), tableName: 'seasons' },
+  { sequelize: db(), modelName: 'Season', tableName: 'seasons' },
 )

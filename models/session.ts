@@ -18,5 +18,5 @@ Session.init(
     expiresAt: { type: DataTypes.DATE, allowNull: false },
     endedAt: { type: DataTypes.DATE, allowNull: true },
   },
-  { sequelize: db(), tableName: 'sessions', timestamps: true, updatedAt: false },
+  { sequelize: db(), modelName: 'Session', tableName: 'sessions', timestamps: true, updatedAt: false },
 )

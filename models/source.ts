@@ -28,5 +28,5 @@ Source.init(
     createdAt: { type: DataTypes.DATE, allowNull: false },
     updatedAt: { type: DataTypes.DATE, allowNull: false },
   },
-  { sequelize: db(), tableName: 'sources' },
+  { sequelize: db(), modelName: 'Source', tableName: 'sources' },
 )

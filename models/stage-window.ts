@@ -18,5 +18,5 @@ StageWindow.init(
     startsOn: { type: DataTypes.DATEONLY, allowNull: false },
     endsOn: { type: DataTypes.DATEONLY, allowNull: false },
   },
-  { sequelize: db(), tableName: 'stage_windows', timestamps: false },
+  { sequelize: db(), modelName: 'StageWindow', tableName: 'stage_windows', timestamps: false },
 )

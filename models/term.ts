@@ -45,5 +45,5 @@ Term.init(
     createdAt: { type: DataTypes.DATE, allowNull: false },
     updatedAt: { type: DataTypes.DATE, allowNull: false },
   },
-  { sequelize: db(), tableName: 'terms' },
+  { sequelize: db(), modelName: 'Term', tableName: 'terms' },
 )

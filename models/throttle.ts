@@ -14,5 +14,5 @@ Throttle.init(
     count: { type: DataTypes.INTEGER, allowNull: false },
     openedAt: { type: DataTypes.DATE, allowNull: false },
   },
-  { sequelize: db(), tableName: 'throttles', timestamps: false },
+  { sequelize: db(), modelName: 'Throttle', tableName: 'throttles', timestamps: false },
 )

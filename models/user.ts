@@ -30,5 +30,5 @@ User.init(
     createdAt: { type: DataTypes.DATE, allowNull: false },
     updatedAt: { type: DataTypes.DATE, allowNull: false },
   },
-  { sequelize: db(), tableName: 'users' },
+  { sequelize: db(), modelName: 'User', tableName: 'users' },
 )

@@ -18,5 +18,5 @@ Verdict.init(
     note: { type: DataTypes.TEXT, allowNull: true },
     createdAt: { type: DataTypes.DATE, allowNull: false },
   },
-  { sequelize: db(), tableName: 'verdicts', timestamps: true, updatedAt: false },
+  { sequelize: db(), modelName: 'Verdict', tableName: 'verdicts', timestamps: true, updatedAt: false },
 )

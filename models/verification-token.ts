@@ -17,5 +17,5 @@ VerificationToken.init(
     token: { type: DataTypes.TEXT, allowNull: false, primaryKey: true },
     expiresAt: { type: DataTypes.DATE, allowNull: false },
   },
-  { sequelize: db(), tableName: 'verification_tokens', timestamps: false },
+  { sequelize: db(), modelName: 'VerificationToken', tableName: 'verification_tokens', timestamps: false },
 )
