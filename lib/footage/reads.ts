@@ -7,20 +7,7 @@ import { services } from '@/lib/services'
 import { Episode } from '@/models/episode'
 import { Footage } from '@/models/footage'
 import { filmBase } from './film-address'
-import { footageView, type FootageView, type LoadedFootage } from './views'
-
-/** Where a film stands, with what its own page shows beside it. */
-export type FootageStatus = FootageView & {
-  /** Bytes that have arrived; only while receiving. */
-  received?: number
-  duration: number | null
-  /** What inspection noticed, in sentences. */
-  notes: string[]
-  /** A film to look at, as soon as the smallest size is there; a signed address. */
-  preview: string | null
-  /** Whether this is what the episode shows now. */
-  isShown: boolean
-}
+import { type FootageStatus, footageView, type LoadedFootage } from './views'
 
 /** What inspection found, kept with the row; `preview` names the folder that is being filled. */
 export type FilmNotes = { notes?: string[]; preview?: string | null }
@@ -62,4 +49,16 @@ export async function readOwnUpload(actor: Actor, uploadId: string): Promise<Foo
   const episode = footage && (await Episode.findByPk(footage.episodeId))
   if (!footage || !episode || !may(actor, 'footage.send', episode)) throw notFound('This upload')
   return footage
+}
+
+/** The same for a page, where no footage yet is an ordinary state and not an error. */
+export async function readFootageIfAny(actor: Actor, episodeId: string): Promise<FootageStatus | null> {
+  const episode = permit(actor, 'footage.see', await Episode.findByPk(episodeId), 'This episode')
+  return (await Footage.count({ where: { episodeId: episode.id } })) === 0 ? null : readFootage(actor, episodeId)
+}
+
+/** Whether this actor may send films for an episode; advisers look on. */
+export async function maySendFootage(actor: Actor, episodeId: string): Promise<boolean> {
+  const episode = await Episode.findByPk(episodeId)
+  return episode !== null && may(actor, 'footage.send', episode)
 }

@@ -16,6 +16,19 @@ export type FootageView = {
   error?: { code: string; detail: string }
 }
 
+/** Where a film stands, with what its own page shows beside it. */
+export type FootageStatus = FootageView & {
+  /** Bytes that have arrived; only while receiving. */
+  received?: number
+  duration: number | null
+  /** What inspection noticed, in sentences. */
+  notes: string[]
+  /** A film to look at, as soon as the smallest size is there; a signed address. */
+  preview: string | null
+  /** Whether this is what the episode shows now. */
+  isShown: boolean
+}
+
 export type LoadedFootage = Footage & { renditions?: Rendition[] }
 
 export const footageView = (row: LoadedFootage): FootageView => ({

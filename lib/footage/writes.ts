@@ -10,9 +10,10 @@ import { services } from '@/lib/services'
 import { Episode } from '@/models/episode'
 import { Footage } from '@/models/footage'
 import { inspectFootage } from './jobs'
-import { newestFootage, readFootage, type FootageStatus } from './reads'
+import { newestFootage, readFootage } from './reads'
 import { cleanFilename, cleanFiletype, keptDays } from './rules'
 import type { UploadMetadata } from './schema'
+import type { FootageStatus } from './views'
 
 export const uploadName = (footageId: string): string => `uploads/${footageId}`
 
