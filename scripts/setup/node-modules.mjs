@@ -8,13 +8,14 @@ const changedAt = (file) => statSync(file, { throwIfNoEntry: false })?.mtimeMs ?
 export const modulesAreStale = (root) =>
   changedAt(path.join(root, 'node_modules/.package-lock.json')) < changedAt(path.join(root, 'package-lock.json'))
 
-/** Turns npm's lines on its downloads into "310 of about 840 packages". */
+/** Turns npm's lines on what it asked for into "310 of about 1840 downloads": first each package's page, then the package. */
 function fetchedSoFar(root, say) {
   const { packages } = JSON.parse(readFileSync(path.join(root, 'package-lock.json'), 'utf8'))
+  const all = 2 * (Object.keys(packages).length - 1)
   let fetched = 0
   return (text) => {
-    fetched += text.match(/^npm http (fetch|cache) .*\.tgz/gm)?.length ?? 0
-    if (fetched > 0) say(`${fetched} of about ${Object.keys(packages).length - 1} packages`)
+    fetched += text.match(/^npm http (fetch|cache) /gm)?.length ?? 0
+    if (fetched > 0) say(`${Math.min(fetched, all)} of about ${all} downloads`)
   }
 }
 

@@ -16,8 +16,12 @@ export function mustHaveRoom({ root, dataDir }) {
     if (error.code === 'ENOSPC') throw error
     throw new Trouble(`${error.path ?? root} cannot be written by this user; start as the owner of this folder.`)
   }
-  const needed = existsSync(path.join(root, 'node_modules/.package-lock.json')) ? 300 : 2500
-  for (const folder of [root, dataDir]) {
+  const hasModules = existsSync(path.join(root, 'node_modules/.package-lock.json'))
+  const needs = [
+    [root, hasModules ? 200 : 1800],
+    [dataDir, 300],
+  ]
+  for (const [folder, needed] of needs) {
     const { bavail, bsize } = statfsSync(folder)
     const free = Math.floor((bavail * bsize) / mega)
     if (free < needed)
