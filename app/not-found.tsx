@@ -7,10 +7,11 @@ import { currentActor } from '@/lib/auth/current'
 export const metadata: Metadata = { title: 'Not found' }
 
 export default async function NotFound() {
+  const person = framePerson(await currentActor())
   return (
-    <Frame person={framePerson(await currentActor())}>
+    <Frame person={person}>
       <Main>
-        <NotHere />
+        <NotHere signedIn={person !== null} />
       </Main>
     </Frame>
   )

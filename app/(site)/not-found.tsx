@@ -1,5 +1,7 @@
 import { NotHere } from '@/components/frame/not-here'
+import { isPerson } from '@/lib/auth/actor'
+import { currentActor } from '@/lib/auth/current'
 
-export default function NotFoundOnSite() {
-  return <NotHere />
+export default async function NotFoundOnSite() {
+  return <NotHere signedIn={isPerson(await currentActor())} />
 }

@@ -29,7 +29,7 @@ export function EpisodeFilters({ years, filter, action }: EpisodeFiltersProps) {
   const narrowed = Object.values(filter).some(Boolean)
   return (
     <form action={action} method="get" aria-label="Narrow the list" className="sheet mb-5 p-4 md:px-5">
-      <div className="grid gap-4 sm:grid-cols-2 lg:grid-cols-5">
+      <div className="grid grid-cols-2 gap-4 md:grid-cols-3 lg:grid-cols-5">
         <Select label="Season" name="season" empty="Any" options={seasons} defaultValue={filter.season ?? ''} />
         <Select label="Crop" name="crop" empty="Any" options={cropOptions} defaultValue={filter.crop ?? ''} />
         <Select label="Stage" name="stage" empty="Any" options={stageOptions} defaultValue={filter.stage ?? ''} />

@@ -2,6 +2,7 @@
 
 import Link from 'next/link'
 import { usePathname } from 'next/navigation'
+import { useEffect, useRef } from 'react'
 import { deskLinks } from './nav-links'
 
 type DeskBarProps = {
@@ -12,12 +13,19 @@ type DeskBarProps = {
 
 /** The second bar: one channel's workspace. */
 export function DeskBar({ channel, people }: DeskBarProps) {
-  const links = deskLinks(usePathname(), channel.slug, people)
+  const pathname = usePathname()
+  const links = deskLinks(pathname, channel.slug, people)
+  const bar = useRef<HTMLElement>(null)
+  useEffect(() => {
+    // On a phone the bar is wider than the screen: the part one is in has to be in sight.
+    const here = bar.current?.querySelector<HTMLElement>('[aria-current]')
+    if (here && bar.current) bar.current.scrollLeft = here.offsetLeft - (bar.current.clientWidth - here.clientWidth) / 2
+  }, [pathname])
   return (
     <div className="no-print border-b border-rule bg-sheet">
       <div className="page flex flex-wrap items-center gap-x-7 md:flex-nowrap">
         <p className="pt-2.5 font-display text-lg font-semibold whitespace-nowrap md:pt-0">{channel.name} desk</p>
-        <nav aria-label={`${channel.name} desk`} className="min-w-0 overflow-x-auto">
+        <nav ref={bar} aria-label={`${channel.name} desk`} className="relative min-w-0 overflow-x-auto">
           <ul className="flex gap-7">
             {links.map(({ href, label, current }) => (
               <li key={href}>

@@ -63,6 +63,7 @@ export function LaneEditor({ lane, year, units, errorAt, change }: LaneEditorPro
         {windows.map((window, index) => (
           <WindowRow
             key={window.key}
+            first={index === 0}
             window={window}
             crop={crop}
             errorAt={(part) => errorAt(`windows.${index}.${part}`)}

@@ -1,6 +1,7 @@
 'use client'
 
 import { useRouter } from 'next/navigation'
+import { useState } from 'react'
 import { Button } from '@/components/ui/button'
 import { Dialog } from '@/components/ui/dialog'
 import { Notice } from '@/components/ui/notice'
@@ -13,15 +14,19 @@ type RemoveSeasonProps = { channel: string; year: number; edition: number }
 export function RemoveSeason({ channel, year, edition }: RemoveSeasonProps) {
   const router = useRouter()
   const remove = useDeleteSeason(channel, year)
+  const [open, setOpen] = useState(false)
   const confirm = () =>
     remove.mutate(edition, {
       onSuccess: () => {
+        setOpen(false)
         router.push(`/desk/${channel}/season`)
         router.refresh()
       },
     })
   return (
     <Dialog
+      open={open}
+      onOpenChange={setOpen}
       trigger={<Button variant="quiet">Take the {year} season off the board</Button>}
       title={`Take the ${year} season off the board?`}
       description="Its lanes and the days of their stages are gone for good. Episodes stay; a season with episodes filed under it cannot be taken off."

@@ -19,6 +19,7 @@ export function SaveNotice({ failed, problem, theirs, onTakeTheirs, onSaveOver }
   if (theirs) {
     return (
       <Notice
+        className="mb-3"
         tone="failed"
         title="Somebody else saved this season meanwhile"
         action={
@@ -38,13 +39,13 @@ export function SaveNotice({ failed, problem, theirs, onTakeTheirs, onSaveOver }
   }
   if (problem?.status === 0) {
     return (
-      <Notice tone="offline" title="The line is down">
+      <Notice className="mb-3" tone="offline" title="The line is down">
         What you wrote is still on this page. Save again when the line is back.
       </Notice>
     )
   }
   return (
-    <Notice tone="failed" title="The season was not saved">
+    <Notice className="mb-3" tone="failed" title="The season was not saved">
       {problem?.detail ?? 'Something failed on the way.'} What you wrote is still on this page.
     </Notice>
   )

@@ -30,7 +30,8 @@ export function SeasonEditor({ channel, season, units }: SeasonEditorProps) {
     <form
       ref={body}
       noValidate
-      className="space-y-5"
+      // The bar at the foot must not lie over the field that has the focus (WCAG 2.2, 2.4.11).
+      className="space-y-5 [&_button]:scroll-mb-24 [&_input]:scroll-mb-24 [&_select]:scroll-mb-24"
       onSubmit={(event) => {
         event.preventDefault()
         submit()
@@ -55,20 +56,22 @@ export function SeasonEditor({ channel, season, units }: SeasonEditorProps) {
       <Button variant="line" onClick={() => change({ move: 'add', key: newKey() })}>
         Add a lane
       </Button>
-      <SaveNotice
-        failed={saving.isError}
-        problem={form.problem}
-        theirs={form.theirs}
-        onTakeTheirs={form.takeTheirs}
-        onSaveOver={save}
-      />
-      <div className="sticky bottom-0 z-20 -mx-px flex flex-wrap items-center gap-x-5 gap-y-2 border border-rule bg-sheet px-4 py-3">
-        <Button type="submit" busy={saving.isPending && 'Saving'}>
-          Save the {season.year} season
-        </Button>
-        <p role="status" className="text-sm text-ink-2">
-          {findings.length > 0 ? `${findings.length} to put right` : unsaved ? 'Not saved yet' : 'All saved'}
-        </p>
+      <div className="sticky bottom-0 z-20 -mx-px border border-rule bg-sheet px-4 py-3">
+        <SaveNotice
+          failed={saving.isError}
+          problem={form.problem}
+          theirs={form.theirs}
+          onTakeTheirs={form.takeTheirs}
+          onSaveOver={save}
+        />
+        <div className="flex flex-wrap items-center gap-x-5 gap-y-2">
+          <Button type="submit" busy={saving.isPending && 'Saving'}>
+            Save the {season.year} season
+          </Button>
+          <p role="status" className="text-sm text-ink-2">
+            {findings.length > 0 ? `${findings.length} to put right` : unsaved ? 'Not saved yet' : 'All saved'}
+          </p>
+        </div>
       </div>
     </form>
   )

@@ -1,3 +1,4 @@
+import { classNames } from '@/components/ui/class-names'
 import { Button } from '@/components/ui/button'
 import { TextField } from '@/components/ui/field'
 import { Select } from '@/components/ui/select'
@@ -8,6 +9,9 @@ import { stageKeys, stageWord, type StageKey } from '@/lib/topics/stage-words'
 import type { WindowDraft } from './season-draft'
 
 type WindowRowProps = {
+  /** The first row shows the labels; on a wide screen they head the columns of the others too. */
+  first: boolean
+
   window: WindowDraft
   crop: Crop
   errorAt: (field: string) => string | undefined
@@ -23,11 +27,16 @@ function options(crop: Crop, current: StageKey) {
 }
 
 /** One stage of a lane: which, from which day, to which day. */
-export function WindowRow({ window, crop, errorAt, onChange, onRemove }: WindowRowProps) {
+export function WindowRow({ first, window, crop, errorAt, onChange, onRemove }: WindowRowProps) {
   const word = stageWord(window.stage, crop)
   return (
-    <li className="grid items-start gap-x-4 gap-y-3 py-4 sm:grid-cols-2 lg:grid-cols-[1.5rem_minmax(0,1.4fr)_minmax(0,1fr)_minmax(0,1fr)_auto]">
-      <StagePatch stage={window.stage} className="hidden h-11 w-6 self-end lg:block" />
+    <li
+      className={classNames(
+        'grid items-start gap-x-4 gap-y-3 py-4 sm:grid-cols-2 lg:grid-cols-[1.5rem_minmax(0,1.4fr)_minmax(0,1fr)_minmax(0,1fr)_auto]',
+        !first && 'lg:py-2 lg:[&_label]:sr-only',
+      )}
+    >
+      <StagePatch stage={window.stage} className={classNames('hidden h-11 w-6 lg:block', first && 'lg:mt-7.5')} />
       <Select
         label="Stage"
         className="sm:col-span-2 lg:col-span-1"
@@ -50,7 +59,7 @@ export function WindowRow({ window, crop, errorAt, onChange, onRemove }: WindowR
         error={errorAt('endsOn')}
         onChange={({ target }) => onChange({ endsOn: target.value })}
       />
-      <Button variant="quiet" className="justify-self-start lg:mt-7.5" onClick={onRemove}>
+      <Button variant="quiet" className={classNames('justify-self-start', first && 'lg:mt-7.5')} onClick={onRemove}>
         Remove <span className="sr-only">{word}</span>
       </Button>
     </li>

@@ -40,7 +40,7 @@ export default async function DeskSeasonPage({ params, searchParams }: PageProps
       {mayEdit && (
         <div className="mt-8 flex flex-wrap items-end justify-between gap-x-8 gap-y-4 border-t border-rule pt-5">
           <BeginSeason channel={slug} year={offered} main={years.length === 0} />
-          {season && <RemoveSeason channel={slug} year={season.year} edition={season.edition} />}
+          {season && <RemoveSeason key={season.id} channel={slug} year={season.year} edition={season.edition} />}
         </div>
       )}
     </div>
