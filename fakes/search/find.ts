@@ -58,10 +58,10 @@ export function find(index: Index, input: SearchInput): Findings {
   const rules = effectiveRules(index.settings.rankingRules)
   const whole = { terms, lexicon, text: query.terms.map(({ words }) => words.join(' ')).join(' ') }
   const found = candidates(lexicon, terms, input.matchingStrategy === 'all')
-    .filter(({ number }) => !refused.has(number) && passes(lexicon.documents[number] ?? {}))
+    .filter(({ number }) => !refused.has(number) && passes(lexicon.documents.get(number) ?? {}))
     .map((each) => ranked(each, whole))
     .sort(byRules(lexicon.documents, rules, sortOrder(index, input.sort ?? [])))
-    .map((each) => ({ document: lexicon.documents[each.number] ?? {}, score: scoreOf(each, rules) }))
+    .map((each) => ({ document: lexicon.documents.get(each.number) ?? {}, score: scoreOf(each, rules) }))
     .filter(({ score }) => score >= (input.rankingScoreThreshold ?? 0))
   return {
     results: distinctOnly(found, input.distinct ?? index.settings.distinctAttribute),

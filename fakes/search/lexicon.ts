@@ -4,51 +4,86 @@ import { FAR, textsOf, tokens, valueAt } from './words'
 /** Where a word stands: which searchable attribute (0 is the most important) and how far into it. */
 export type Place = { attribute: number; position: number }
 
-/** Every word of an index and where it stands, by the document's place in `documents`. */
+/** Every word of an index and where it stands, by the number of the document. Changes with the documents one by one. */
 export type Lexicon = {
-  documents: Doc[]
+  documents: Map<number, Doc>
   attributes: string[]
   words: Map<string, Map<number, Place[]>>
-  /** Folded words of each attribute of each document, to tell whether a query is all of it. */
+  /** The folded words of whole attributes, to tell whether a query is all of one. */
   wholes: Map<string, Set<number>>
+  numbers: Map<string, number>
+  nextNumber: number
+  /** What of the two tables above a document has put there. */
+  entries: Map<number, { words: Set<string>; wholes: Set<string> }>
 }
 
-function searchable(index: Index, documents: Doc[]): string[] {
-  const wanted = index.settings.searchableAttributes
-  if (!wanted.includes('*')) return wanted
-  return [...new Set(documents.flatMap((document) => Object.keys(document)))]
-}
-
-function read(lexicon: Lexicon, number: number, attribute: number, texts: string[]) {
-  let position = 0
-  for (const text of texts) {
-    const found = tokens(text, position)
-    for (const { word, position: at } of found) {
-      const documents = lexicon.words.get(word) ?? new Map<number, Place[]>()
-      lexicon.words.set(word, documents)
-      const places = documents.get(number) ?? []
-      documents.set(number, places)
-      places.push({ attribute, position: at })
-    }
-    const whole = found.map(({ word }) => word).join(' ')
-    lexicon.wholes.set(whole, (lexicon.wholes.get(whole) ?? new Set()).add(number))
-    position = (found.at(-1)?.position ?? position) + FAR
+function readText(lexicon: Lexicon, number: number, attribute: number, text: string, from: number): number {
+  const found = tokens(text, from)
+  const entry = lexicon.entries.get(number)
+  for (const { word, position } of found) {
+    let documents = lexicon.words.get(word)
+    if (!documents) lexicon.words.set(word, (documents = new Map()))
+    const places = documents.get(number)
+    if (places) places.push({ attribute, position })
+    else documents.set(number, [{ attribute, position }])
+    entry?.words.add(word)
   }
+  const whole = found.map(({ word }) => word).join(' ')
+  lexicon.wholes.set(whole, (lexicon.wholes.get(whole) ?? new Set()).add(number))
+  entry?.wholes.add(whole)
+  return (found.at(-1)?.position ?? from) + FAR
 }
 
-/** Reads the whole index into a lexicon; kept until the next write. */
+/** Takes out what a document has put in; its number stays its own. */
+export function forgetDocument(lexicon: Lexicon, key: string) {
+  const number = lexicon.numbers.get(key) ?? -1
+  const entry = lexicon.entries.get(number)
+  for (const word of entry?.words ?? []) {
+    const documents = lexicon.words.get(word)
+    documents?.delete(number)
+    if (documents?.size === 0) lexicon.words.delete(word)
+  }
+  for (const whole of entry?.wholes ?? []) {
+    const documents = lexicon.wholes.get(whole)
+    documents?.delete(number)
+    if (documents?.size === 0) lexicon.wholes.delete(whole)
+  }
+  lexicon.entries.delete(number)
+  lexicon.documents.delete(number)
+}
+
+/** Puts a document in, or in place of the one that had its key. */
+export function rememberDocument(lexicon: Lexicon, index: Index, key: string, document: Doc) {
+  forgetDocument(lexicon, key)
+  const number = lexicon.numbers.get(key) ?? lexicon.nextNumber++
+  lexicon.numbers.set(key, number)
+  lexicon.documents.set(number, document)
+  lexicon.entries.set(number, { words: new Set(), wholes: new Set() })
+  if (index.settings.searchableAttributes.includes('*')) {
+    for (const name of Object.keys(document)) if (!lexicon.attributes.includes(name)) lexicon.attributes.push(name)
+  }
+  lexicon.attributes.forEach((name, attribute) => {
+    let position = 0
+    for (const text of textsOf(valueAt(document, name))) {
+      position = readText(lexicon, number, attribute, text, position)
+    }
+  })
+}
+
+/** The lexicon of an index, read whole where there is none: after a start, and after a change of settings. */
 export function lexiconOf(index: Index): Lexicon {
   if (index.lexicon) return index.lexicon
-  const documents = [...index.documents.values()]
+  const wanted = index.settings.searchableAttributes
   const lexicon: Lexicon = {
-    documents,
-    attributes: searchable(index, documents),
+    documents: new Map(),
+    attributes: wanted.includes('*') ? [] : [...wanted],
     words: new Map(),
     wholes: new Map(),
+    numbers: new Map(),
+    nextNumber: 0,
+    entries: new Map(),
   }
-  documents.forEach((document, number) => {
-    lexicon.attributes.forEach((name, attribute) => read(lexicon, number, attribute, textsOf(valueAt(document, name))))
-  })
+  for (const [key, document] of index.documents) rememberDocument(lexicon, index, key, document)
   index.lexicon = lexicon
   return lexicon
 }

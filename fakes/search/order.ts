@@ -34,8 +34,12 @@ export function sortOrder(index: Index, sort: string[]): Order {
 }
 
 /** Better first, rule by rule; a later rule decides only what the earlier ones leave even. */
-export function byRules(documents: Doc[], rules: string[], sort: Order): (left: Found, right: Found) => number {
-  const document = ({ number }: Found): Doc => documents[number] ?? {}
+export function byRules(
+  documents: Map<number, Doc>,
+  rules: string[],
+  sort: Order,
+): (left: Found, right: Found) => number {
+  const document = ({ number }: Found): Doc => documents.get(number) ?? {}
   const orders = rules.map((rule) => {
     const custom = /^(.+):(asc|desc)$/.exec(rule)
     if (rule === 'sort') return (left: Found, right: Found) => sort(document(left), document(right))

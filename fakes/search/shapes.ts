@@ -5,7 +5,7 @@ import type { Settings } from './settings'
 export type Json = string | number | boolean | null | Json[] | { [key: string]: Json }
 export type Doc = { [field: string]: Json }
 
-/** One index in memory. `lexicon` is derived from documents and settings, made at the first search after a change. */
+/** One index in memory. `lexicon` is derived from documents and settings, made at the first search. */
 export type Index = {
   uid: string
   file: string

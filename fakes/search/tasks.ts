@@ -45,7 +45,6 @@ function run(store: Store, task: Task, work: Work) {
   try {
     const { details, changed } = apply(store, work)
     for (const index of changed) {
-      index.lexicon = null
       index.updatedAt = new Date().toISOString()
       store.saveIndex(index)
     }

@@ -8,6 +8,8 @@ export const FAR = 8
 
 /** Case and accents do not count when words are compared. */
 export function folded(word: string): string {
+  // Most words are plain letters, and taking a text apart is costly.
+  if (/^[a-z0-9]*$/i.test(word)) return word.toLowerCase()
   return word
     .normalize('NFKD')
     .replace(/\p{M}+/gu, '')

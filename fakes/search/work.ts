@@ -1,5 +1,6 @@
 import { badRequest, SearchError } from './errors'
 import { filterTest } from './filter-match'
+import { forgetDocument, rememberDocument } from './lexicon'
 import type { Doc, Index, Json, Work } from './shapes'
 import { keyOf, type Store } from './store'
 
@@ -41,7 +42,9 @@ function addDocuments(store: Store, work: Extract<Work, { type: 'documentAdditio
   index.primaryKey = primaryKey
   for (const document of documents) {
     const key = keyOf(document, primaryKey)
-    index.documents.set(key, merge ? { ...index.documents.get(key), ...document } : document)
+    const whole = merge ? { ...index.documents.get(key), ...document } : document
+    index.documents.set(key, whole)
+    if (index.lexicon) rememberDocument(index.lexicon, index, key, whole)
   }
   return { details: { indexedDocuments: documents.length }, changed: [index] }
 }
@@ -49,10 +52,11 @@ function addDocuments(store: Store, work: Extract<Work, { type: 'documentAdditio
 function deleteDocuments(store: Store, work: Extract<Work, { type: 'documentDeletion' }>): Outcome {
   const index = store.index(work.indexUid)
   const before = index.documents.size
-  if (work.ids) for (const id of work.ids) index.documents.delete(id)
-  else {
-    const passes = filterTest(index, work.filter)
-    for (const [key, document] of index.documents) if (passes(document)) index.documents.delete(key)
+  const passes = filterTest(index, work.filter)
+  const keys = work.ids ?? [...index.documents].filter(([, document]) => passes(document)).map(([key]) => key)
+  for (const key of keys) {
+    index.documents.delete(key)
+    if (index.lexicon) forgetDocument(index.lexicon, key)
   }
   return { details: { deletedDocuments: before - index.documents.size }, changed: [index] }
 }
@@ -91,6 +95,7 @@ function deleteIndex(store: Store, uid: string): Outcome {
 function changeSettings(store: Store, work: Extract<Work, { type: 'settingsUpdate' }>): Outcome {
   const index = store.indexes.get(work.indexUid) ?? store.newIndex(work.indexUid, null)
   index.settings = { ...index.settings, ...work.settings }
+  index.lexicon = null
   return { details: work.settings, changed: [index] }
 }
 

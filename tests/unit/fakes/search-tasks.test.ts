@@ -65,6 +65,31 @@ test('documents are replaced whole or joined field by field, and vanish when del
   expect(await found()).toEqual([])
 })
 
+test('after any order of writes a search finds what a freshly read index finds', async () => {
+  const texts = ['frost on wheat', 'wheat at harvest', 'frost and harvest', 'hoop']
+  await index()
+    .addDocuments([{ id: 0, text: 'frost' }])
+    .waitTask()
+  await found('passages', 'frost')
+  for (let step = 0; step < 24; step++) {
+    const id = (step * 7) % 5
+    if (step % 4 === 3) await index().deleteDocument(id).waitTask()
+    else if (step % 4 === 2)
+      await index()
+        .updateDocuments([{ id, note: texts[step % 3] }])
+        .waitTask()
+    else
+      await index()
+        .addDocuments([{ id, text: texts[step % texts.length] }])
+        .waitTask()
+  }
+  const answers = () => Promise.all(['frost', 'wheat', 'harvest', 'hoop', ''].map((q) => found('passages', q)))
+  const before = await answers()
+  await trial.restart()
+  expect((await answers()).map((ids) => ids.sort())).toEqual(before.map((ids) => ids.sort()))
+  expect(before.flat().length).toBeGreaterThan(4)
+})
+
 test('a fresh index takes the place of the old one in one step', async () => {
   await fill()
   await trial.client.createIndex('passages-new', { primaryKey: 'id' }).waitTask()
