@@ -23,7 +23,7 @@ export function BoardLane({ name, note, span, episodes, stages, children }: Boar
   return (
     <section aria-label={note ? `${name}, ${note}` : name} className="border-b border-rule-2 md:flex">
       <div className="sticky left-0 z-20 w-max max-w-80 bg-sheet px-3.5 pt-3 leading-tight md:w-47.5 md:shrink-0 md:py-4 md:pl-4.5">
-        <h3 className="text-[1.125rem]">{name}</h3>
+        <h2 className="text-[1.125rem]">{name}</h2>
         {note && <p className="mt-0.5 text-xs text-ink-3">{note}</p>}
       </div>
       <div className="relative flex-1" style={{ height: ABOVE_LANE + levels * LEVEL + 8 }}>

@@ -7,14 +7,34 @@ import { cropWord } from '@/lib/topics/crops'
 import { lanesOf } from './board-geometry'
 import { fieldWords, type SeasonBoardProps } from './season-board'
 
-/** The board as plain lists, for a screen too narrow to show a year at once. */
-export function BoardList({ season, episodes, today, units, episodesUrl }: SeasonBoardProps) {
+const title = 'The season as a list'
+
+/** The board as plain lists: in the open where a screen is too narrow to show a year at once, else folded away. */
+export function BoardList(props: SeasonBoardProps) {
+  if (props.season.plantings.length === 0 && props.episodes.length === 0) return null
+  return (
+    <>
+      <section className="sheet mt-6 md:hidden">
+        <h2 className="border-b border-rule-2 px-3.5 py-3.5">{title}</h2>
+        <Lanes {...props} />
+      </section>
+      <details className="sheet group hidden border-t-0 md:block">
+        <summary className="px-4.5 py-3 font-semibold text-water underline group-open:border-b group-open:border-rule-2">
+          {title}
+        </summary>
+        <Lanes {...props} />
+      </details>
+    </>
+  )
+}
+
+function Lanes({ season, episodes, today, units, episodesUrl }: SeasonBoardProps) {
   const { lanes, rest } = lanesOf(season, episodes)
   const stageHref = (code: string) => `${episodesUrl}?season=${season.year}&stage=${code}`
   return (
-    <div className="sheet ruled md:hidden">
+    <div className="ruled md:grid md:grid-cols-2 lg:grid-cols-3 md:[&>*+*]:border-t-0">
       {lanes.map(({ planting, episodes: own }) => (
-        <section key={planting.id} className="px-3.5 py-4">
+        <section key={planting.id} className="px-3.5 py-4 md:px-4.5">
           <h3>{cropWord(planting.crop)}</h3>
           <p className="text-sm text-ink-3">{fieldWords(planting, units)}</p>
           <Stages planting={planting} today={today} href={stageHref} />
@@ -22,7 +42,7 @@ export function BoardList({ season, episodes, today, units, episodesUrl }: Seaso
         </section>
       ))}
       {rest.length > 0 && (
-        <section className="px-3.5 py-4">
+        <section className="px-3.5 py-4 md:px-4.5">
           <h3>Whole farm</h3>
           <Filmed episodes={rest} />
         </section>
