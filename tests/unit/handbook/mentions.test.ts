@@ -37,6 +37,9 @@ describe('a term in what is said', () => {
     ['The power take-off is live.', ['power take-off → pto']],
     ['A combine harvester is coming.', ['combine harvester → combine']],
     ['Walk the bund.', ['bund → levee']],
+    ['Soak it until it is pre-germinated.', ['pre-germinated → pre-germinated-seed']],
+    ['We puddle the soil so that it seals.', ['puddle the soil → puddling']],
+    ['The seed leaves are open.', ['seed leaves → cotyledon']],
     // The longest form wins.
     ['It is at field capacity.', ['field capacity → field-capacity']],
     ['The drain tile and the grain drill.', ['drain tile → tile', 'grain drill → drill']],
@@ -93,6 +96,8 @@ describe('meanings told apart', () => {
     ['Clay will shrink and crack.', null, []],
     ['Residue keeps it wet.', null, ['Residue → residue']],
     ['Rinse the chemical residue out.', null, []],
+    ['Left late, it will shatter before the combine.', 'wheat', ['shatter → shatter', 'combine → combine']],
+    ['Drop it and the glass will shatter.', null, []],
     ['Tile runs under here.', null, ['Tile → tile']],
     ['The roof tile fell.', null, []],
     ['Close the gate behind the cattle, the road is near.', null, []],

@@ -142,7 +142,7 @@ export const growthTerms = termsOf('Planting and growth', [
     synonyms: ['booting', 'boot stage'],
     context: {
       crops: cereals,
-      near: [...heads, 'early', 'mid', 'late', 'swollen', 'heading', 'wheat', 'rice'],
+      near: [...heads, 'early', 'mid', 'late', 'flood', 'swollen', 'heading', 'wheat', 'rice'],
       notNear: ['rubber', 'muddy', 'wear', 'toe', 'truck', 'lace'],
     },
     sourceNote: bbch,

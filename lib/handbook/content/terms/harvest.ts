@@ -1,7 +1,9 @@
 import { asabe, notYetHeldAgainst, termsOf } from '../term'
 
 const grain =
-  'grain elevator ticket corn maize wheat beans soybeans rice bushel bushels points dry dried drying drier'.split(' ')
+  'grain elevator ticket corn maize wheat beans soybeans rice bushel bushels points dry dried drying drier percent load weigh weight'.split(
+    ' ',
+  )
 const fgis = notYetHeldAgainst('the USDA FGIS handbooks')
 
 export const harvestTerms = termsOf('Harvest and storage', [
@@ -69,7 +71,24 @@ export const harvestTerms = termsOf('Harvest and storage', [
     definition: 'Grain falling out of the head or pod before or as it is cut.',
     inflections: ['shattered', 'shattering', 'shatters'],
     context: {
-      near: ['grain', 'pod', 'pods', 'head', 'heads', 'seed', 'seeds', 'bean', 'beans', 'wheat', 'loss', 'losses'],
+      near: [
+        'combine',
+        'ripe',
+        'kernel',
+        'kernels',
+        'grain',
+        'pod',
+        'pods',
+        'head',
+        'heads',
+        'seed',
+        'seeds',
+        'bean',
+        'beans',
+        'wheat',
+        'loss',
+        'losses',
+      ],
     },
     spanish: 'desgrane',
     sourceNote: notYetHeldAgainst('an extension handbook'),

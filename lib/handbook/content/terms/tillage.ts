@@ -126,7 +126,7 @@ export const tillageTerms = termsOf('Tillage and soil', [
     slug: 'puddling',
     label: 'puddling',
     definition: 'Working flooded soil on purpose until its structure is gone and it holds water, as for paddy rice.',
-    inflections: ['puddled'],
+    inflections: ['puddled', 'puddle the soil'],
     spanish: 'fangueo',
     sourceNote: notYetHeldAgainst('the IRRI Rice Knowledge Bank'),
   },
