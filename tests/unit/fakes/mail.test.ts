@@ -3,10 +3,13 @@ import { connect } from 'node:net'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { createTransport, type SendMailOptions } from 'nodemailer'
-import { afterEach, beforeEach, expect, test } from 'vitest'
+import { afterEach, beforeEach, expect, test, vi } from 'vitest'
 import type { Letter } from '@/fakes/mail/letter'
 import { startMailFake } from '@/fakes/mail/start'
 import { freePorts } from '../../support/free-ports'
+
+// Real servers and a real disk: a busy machine is not a failure.
+vi.setConfig({ testTimeout: 30_000, hookTimeout: 30_000 })
 
 let directory: string
 let ports: { smtpPort: number; pagePort: number }

@@ -1,6 +1,9 @@
-import { afterAll, beforeAll, expect, test } from 'vitest'
+import { afterAll, beforeAll, expect, test, vi } from 'vitest'
 import type { Filter } from 'meilisearch'
 import { searchTrial } from './search-trial'
+
+// Real servers and a real disk: a busy machine is not a failure.
+vi.setConfig({ testTimeout: 30_000, hookTimeout: 30_000 })
 
 let trial: Awaited<ReturnType<typeof searchTrial>>
 const documents = [

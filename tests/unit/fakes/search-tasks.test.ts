@@ -1,8 +1,11 @@
 import { writeFile } from 'node:fs/promises'
 import { join } from 'node:path'
 import { Meilisearch } from 'meilisearch'
-import { afterEach, beforeEach, expect, test } from 'vitest'
+import { afterEach, beforeEach, expect, test, vi } from 'vitest'
 import { passages, searchTrial } from './search-trial'
+
+// Real servers and a real disk: a busy machine is not a failure.
+vi.setConfig({ testTimeout: 30_000, hookTimeout: 30_000 })
 
 let trial: Awaited<ReturnType<typeof searchTrial>>
 beforeEach(async () => void (trial = await searchTrial()))
