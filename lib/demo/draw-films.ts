@@ -1,6 +1,7 @@
 import { spawn } from 'node:child_process'
 import { createHash } from 'node:crypto'
-import { access, rename, rm } from 'node:fs/promises'
+import { existsSync } from 'node:fs'
+import { rename, rm } from 'node:fs/promises'
 import { basename, join } from 'node:path'
 import sharp from 'sharp'
 import type { CutSheet } from './cut-sheet'
@@ -47,32 +48,32 @@ export async function drawFilm(episode: StoryEpisode, voiced: Voiced, folder: st
   const frames = framesOf(episode, voiced.sheet)
   const hash = createHash('sha256').update(basename(voiced.sound)).update(frames.join('')).digest('hex').slice(0, 12)
   const film = join(folder, `${episode.key}-${hash}.mp4`)
-  if (
-    await access(film).then(
-      () => true,
-      () => false,
-    )
-  )
-    return film
-
+  if (existsSync(film)) return film
   const part = join(folder, `${episode.key}-${hash}.${process.pid}.part.mp4`)
-  const encoder = spawn('ffmpeg', encoderArguments(voiced.sound, part), { stdio: ['pipe', 'ignore', 'pipe'] })
+  try {
+    await encode(frames, encoderArguments(voiced.sound, part))
+    await rename(part, film)
+    return film
+  } finally {
+    await rm(part, { force: true })
+  }
+}
+
+/** Gives the pictures to ffmpeg as fast as it takes them. Throws with its last words when it fails. */
+async function encode(frames: string[], args: string[]): Promise<void> {
+  const encoder = spawn('ffmpeg', args, { stdio: ['pipe', 'ignore', 'pipe'] })
   const said: Buffer[] = []
   encoder.stderr.on('data', (chunk: Buffer) => said.push(chunk))
   const ended = new Promise<number | null>((resolve, reject) => encoder.once('error', reject).once('close', resolve))
   // A broken pipe shows as the exit code below; without a listener it would end the process.
   encoder.stdin.on('error', () => undefined)
   for await (const pixels of rendered(frames)) {
-    if (!encoder.stdin.write(pixels))
-      await Promise.race([new Promise((resolve) => encoder.stdin.once('drain', resolve)), ended])
+    if (encoder.stdin.write(pixels)) continue
+    await Promise.race([new Promise((resolve) => encoder.stdin.once('drain', resolve)), ended])
   }
   encoder.stdin.end()
-  if ((await ended) !== 0) {
-    await rm(part, { force: true })
-    throw new Error(`drawing ${episode.key} failed: ${Buffer.concat(said).toString('utf8').slice(-600)}`)
-  }
-  await rename(part, film)
-  return film
+  const status = await ended
+  if (status !== 0) throw new Error(`ffmpeg ended with ${status}: ${Buffer.concat(said).toString('utf8').slice(-600)}`)
 }
 
 async function* rendered(frames: string[]): AsyncGenerator<Buffer> {

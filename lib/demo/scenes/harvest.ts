@@ -4,6 +4,16 @@ import { label } from './lettering'
 import { combine } from './machines'
 import { beanFlower, trefoil, wheatHead } from './plants'
 
+const headsInFront = (t: number) =>
+  many(7, (i) => {
+    const hx = 790 + i * 76
+    const turn = (i - 3) * 6 + sway(t, 3, i / 7) * 4
+    return (
+      stroke(`M${hx} 730Q${hx} 620 ${hx + turn * 2} ${560 - (i % 3) * 30}`, ink.strawDark, 7) +
+      wheatHead(hx + turn * 2, 560 - (i % 3) * 30, turn, 0.95)
+    )
+  })
+
 /** The combine crosses ripe wheat and leaves stubble; a handful of heads stands in front. */
 export const combining: Scene = ({ t, of }) => {
   const x = 120 + (t / of) * 620
@@ -20,14 +30,6 @@ export const combining: Scene = ({ t, of }) => {
   const chaff = many(14, (i) =>
     dot(x - 350 - ((t * 90 + i * 29) % 190), 330 + ((i * 37) % 120), 4, ink.straw, { opacity: 0.7 }),
   )
-  const front = many(7, (i) => {
-    const hx = 790 + i * 76
-    const turn = (i - 3) * 6 + sway(t, 3, i / 7) * 4
-    return (
-      stroke(`M${hx} 730Q${hx} 620 ${hx + turn * 2} ${560 - (i % 3) * 30}`, ink.strawDark, 7) +
-      wheatHead(hx + turn * 2, 560 - (i % 3) * 30, turn, 0.95)
-    )
-  })
   return (
     sky(300) +
     rect(0, 300, 1280, 420, ink.stubble) +
@@ -35,9 +37,27 @@ export const combining: Scene = ({ t, of }) => {
     combine(x, 470, t) +
     uncut +
     chaff +
-    front
+    headsInFront(t)
   )
 }
+
+const wagon =
+  path('M200 430H1080L1020 620H260Z', { fill: ink.waterDeep }) +
+  rect(190, 416, 900, 26, ink.iron) +
+  dot(400, 650, 56, ink.ironDark) +
+  dot(400, 650, 24, ink.ironLight) +
+  dot(880, 650, 56, ink.ironDark) +
+  dot(880, 650, 24, ink.ironLight)
+const spout = path('M1280 40L690 120Q600 130 606 190H676Q680 170 720 168L1280 100Z', { fill: ink.iron })
+const bin =
+  rect(40, 130, 250, 360, '#c9ccc6') +
+  path('M26 136L165 40L304 136Z', { fill: ink.ironLight }) +
+  stroke(
+    many(5, (i) => `M40 ${190 + i * 60}H290`),
+    '#aeb3ac',
+    5,
+  ) +
+  rect(140, 400, 60, 90, ink.iron)
 
 /** Grain falls from the spout into the wagon, and the heap rises. */
 export const grainFlow: Scene = ({ t, of, line, since }) => {
@@ -52,23 +72,6 @@ export const grainFlow: Scene = ({ t, of, line, since }) => {
   const heap = path(`M250 560Q430 ${560 - high * 0.5} 640 ${540 - high}Q850 ${560 - high * 0.5} 1030 560Z`, {
     fill: ink.strawDark,
   })
-  const wagon =
-    path('M200 430H1080L1020 620H260Z', { fill: ink.waterDeep }) +
-    rect(190, 416, 900, 26, ink.iron) +
-    dot(400, 650, 56, ink.ironDark) +
-    dot(400, 650, 24, ink.ironLight) +
-    dot(880, 650, 56, ink.ironDark) +
-    dot(880, 650, 24, ink.ironLight)
-  const spout = path('M1280 40L690 120Q600 130 606 190H676Q680 170 720 168L1280 100Z', { fill: ink.iron })
-  const bin =
-    rect(40, 130, 250, 360, '#c9ccc6') +
-    path('M26 136L165 40L304 136Z', { fill: ink.ironLight }) +
-    stroke(
-      many(5, (i) => `M40 ${190 + i * 60}H290`),
-      '#aeb3ac',
-      5,
-    ) +
-    rect(140, 400, 60, 90, ink.iron)
   return (
     sky(420) +
     rect(0, 420, 1280, 300, ink.stubble) +
@@ -81,6 +84,15 @@ export const grainFlow: Scene = ({ t, of, line, since }) => {
     (line >= 1 && (line > 1 || since > 2.5) ? label(770, 480, '5.88 %') : '')
   )
 }
+
+const bee = (t: number) =>
+  at(
+    820 + sway(t, 5) * 120,
+    330 + sway(t, 2.5) * 36,
+    oval(0, 0, 17, 11, { fill: ink.straw }) +
+      stroke('M-4 -10V10M6 -9V9', ink.ironDark, 5) +
+      oval(-2, -14, 14, 7, { fill: ink.white, opacity: 0.85 }),
+  )
 
 /** A bean stem with flowers opening from the lowest node upward. */
 export const beanFlowering: Scene = ({ t, of }) => {
@@ -99,18 +111,11 @@ export const beanFlowering: Scene = ({ t, of }) => {
       flowers
     )
   })
-  const bee = at(
-    820 + sway(t, 5) * 120,
-    330 + sway(t, 2.5) * 36,
-    oval(0, 0, 17, 11, { fill: ink.straw }) +
-      stroke('M-4 -10V10M6 -9V9', ink.ironDark, 5) +
-      oval(-2, -14, 14, 7, { fill: ink.white, opacity: 0.85 }),
-  )
   return (
     close() +
     stroke(`M640 720Q632 400 640 110`, ink.leaf, 20) +
     nodes +
     trefoil(640, 130, wind * 2, 0.8, ink.leafLight) +
-    (t > of * 0.3 ? bee : '')
+    (t > of * 0.3 ? bee(t) : '')
   )
 }

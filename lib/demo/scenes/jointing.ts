@@ -3,30 +3,31 @@ import { at, dot, ink, many, oval, path, ramp, rect, stroke, sway, type Scene } 
 import { label } from './lettering'
 import { roots, stem } from './plants'
 
+const wall = path('M540 560Q530 270 556 -20H724Q750 270 740 560Q700 610 640 610T540 560Z', { fill: ink.leaf })
+const hollow = path('M592 560Q586 270 602 -20H678Q694 270 688 560Q660 580 640 580T592 560Z', { fill: '#e9efd3' })
+const plate = (y: number, colour: string) =>
+  path(`M590 ${y - 13}Q640 ${y - 25} 690 ${y - 13}V${y + 13}Q640 ${y + 2} 590 ${y + 13}Z`, { fill: colour })
+const rule = at(
+  820,
+  560,
+  rect(0, -480, 96, 500, ink.paper) +
+    stroke(
+      many(26, (i) => `M0 ${-i * 19}h${i % 10 === 0 ? 62 : i % 5 ? 22 : 40}`),
+      ink.ironDark,
+      3,
+    ),
+)
+
 /** A slit stem beside a rule: the first node rises to its centimetre, the young head above it. */
 export const firstNode: Scene = ({ t, line, since }) => {
   const risen = line === 0 ? 0.2 + ramp(t, 1, 4) * 0.3 : line === 1 ? 0.5 + 0.5 * ramp(since, 0, 4) : 1
   const node = 560 - 190 * risen
-  const wall = path('M540 560Q530 270 556 -20H724Q750 270 740 560Q700 610 640 610T540 560Z', { fill: ink.leaf })
-  const hollow = path('M592 560Q586 270 602 -20H678Q694 270 688 560Q660 580 640 580T592 560Z', { fill: '#e9efd3' })
-  const plate = (y: number, colour: string) =>
-    path(`M590 ${y - 13}Q640 ${y - 25} 690 ${y - 13}V${y + 13}Q640 ${y + 2} 590 ${y + 13}Z`, { fill: colour })
   const young = at(
     640,
     node - 40,
     path('M0 -70Q22 -30 12 0H-12Q-22 -30 0 -70Z', { fill: ink.leafLight }) +
       stroke('M-8 -14H8M-9 -30H9M-6 -46H6', ink.leafDark, 3),
     { scale: line >= 2 ? 1.25 : 1 },
-  )
-  const rule = at(
-    820,
-    560,
-    rect(0, -480, 96, 500, ink.paper) +
-      stroke(
-        many(26, (i) => `M0 ${-i * 19}h${i % 10 === 0 ? 62 : i % 5 ? 22 : 40}`),
-        ink.ironDark,
-        3,
-      ),
   )
   const reach = line >= 1 ? stroke(`M770 560V370M754 560H786M754 370H786`, ink.mark, 5) + label(936, 420, '1 cm') : ''
   const wind = sway(t, 3) * 8

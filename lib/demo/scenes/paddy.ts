@@ -5,31 +5,34 @@ import { tuft } from './plants'
 
 const ridge = (d: string, colour: string) => path(d, { fill: colour })
 
+/** The basin, its water once it is filled, and the bank below it. */
+function terrace(i: number, t: number, of: number): string {
+  const y = 212 + i * 57
+  const filled = ramp(t, 0.5 + i * (of / 13), 2.5 + i * (of / 13))
+  const left = 436 - i * 50
+  const right = 884 + i * 46
+  const basin = `M${left} ${y}Q640 ${y - 34} ${right} ${y}L${right + 28} ${y + 32}Q640 ${y + 4} ${left - 28} ${y + 32}Z`
+  const bank = `M${left - 28} ${y + 31}Q640 ${y + 3} ${right + 28} ${y + 31}L${right + 46} ${y + 59}Q640 ${y + 30} ${left - 46} ${y + 59}Z`
+  const glint =
+    filled > 0.8
+      ? stroke(
+          `M${480 + sway(t, 4, i / 6) * 14 - i * 20} ${y + 2}h${80 + i * 12}M${760 + i * 20 + sway(t, 4, i / 5) * 12} ${y + 10}h60`,
+          ink.white,
+          4,
+          0.6,
+        )
+      : ''
+  return (
+    path(basin, { fill: ink.soilDark }) +
+    path(basin, { fill: ink.water, opacity: Math.round(filled * 10) / 10 }) +
+    glint +
+    path(bank, { fill: i % 2 ? '#7f9a5c' : '#8aa566' })
+  )
+}
+
 /** Terraces down a hillside fill one after another, the top one first. */
 export const terraces: Scene = ({ t, of }) => {
-  const steps = many(9, (i) => {
-    const y = 212 + i * 57
-    const filled = ramp(t, 0.5 + i * (of / 13), 2.5 + i * (of / 13))
-    const left = 436 - i * 50
-    const right = 884 + i * 46
-    const basin = `M${left} ${y}Q640 ${y - 34} ${right} ${y}L${right + 28} ${y + 32}Q640 ${y + 4} ${left - 28} ${y + 32}Z`
-    const bank = `M${left - 28} ${y + 31}Q640 ${y + 3} ${right + 28} ${y + 31}L${right + 46} ${y + 59}Q640 ${y + 30} ${left - 46} ${y + 59}Z`
-    const glint =
-      filled > 0.8
-        ? stroke(
-            `M${480 + sway(t, 4, i / 6) * 14 - i * 20} ${y + 2}h${80 + i * 12}M${760 + i * 20 + sway(t, 4, i / 5) * 12} ${y + 10}h60`,
-            ink.white,
-            4,
-            0.6,
-          )
-        : ''
-    return (
-      path(basin, { fill: ink.soilDark }) +
-      path(basin, { fill: ink.water, opacity: Math.round(filled * 10) / 10 }) +
-      glint +
-      path(bank, { fill: i % 2 ? '#7f9a5c' : '#8aa566' })
-    )
-  })
+  const steps = many(9, (i) => terrace(i, t, of))
   const stream = stroke(`M700 120Q660 150 690 180T660 226`, ink.waterDeep, 14)
   return (
     rect(0, 0, 1280, 720, ink.sky) +
@@ -39,6 +42,39 @@ export const terraces: Scene = ({ t, of }) => {
     steps
   )
 }
+
+const lower = path('M760 566H1280V640H700Z', { fill: ink.water })
+const bank =
+  path('M430 540L540 300H720L850 600V720H330Z', { fill: ink.soil }) +
+  path('M524 330L540 300H720L740 346Q630 322 524 330Z', { fill: '#7f9a5c' })
+const gap = rect(560, 330, 90, 210, ink.soilWet)
+const apron = path('M552 540H664L810 602V720H552Z', { fill: ink.plankDark })
+const theLevee =
+  lower + path('M0 540H440V720H0Z', { fill: ink.soilDark }) + rect(700, 636, 580, 84, ink.soilDark) + bank + gap + apron
+const gateFrame =
+  rect(546, 250, 18, 296, ink.plankDark) +
+  rect(646, 250, 18, 296, ink.plankDark) +
+  rect(546, 244, 118, 18, ink.plankDark)
+const staff =
+  rect(300, 280, 30, 262, ink.white) +
+  stroke(
+    many(9, (i) => `M300 ${300 + i * 26}h${i % 2 ? 14 : 22}`),
+    ink.mark,
+    4,
+  )
+const beyond =
+  rect(0, 0, 1280, 300, ink.sky) +
+  path('M0 260Q300 150 620 210T1280 170V340H0Z', { fill: ink.trees }) +
+  rect(0, 300, 1280, 420, '#8aa566')
+
+const heldWater = (level: number, t: number) =>
+  path(`M0 ${level}H560V540H0Z`, { fill: ink.water }) +
+  stroke(
+    `M${60 + sway(t, 3) * 16} ${level + 26}h90M${260 + sway(t, 3, 0.4) * 16} ${level + 48}h70M${420 - sway(t, 3) * 10} ${level + 20}h60`,
+    ink.white,
+    4,
+    0.6,
+  )
 
 /** A board is lifted out of the gate and the water comes through; the level falls to the mark. */
 export const leveeGate: Scene = ({ t, of, line, since }) => {
@@ -51,47 +87,15 @@ export const leveeGate: Scene = ({ t, of, line, since }) => {
   const jet = flow
     ? path(`M562 ${540 - lifted * 0.3}H650Q700 ${536 - lifted * 0.2} 800 572V600L664 546H562Z`, { fill: ink.waterDeep })
     : ''
-  const upper =
-    path(`M0 ${level}H560V540H0Z`, { fill: ink.water }) +
-    stroke(
-      `M${60 + sway(t, 3) * 16} ${level + 26}h90M${260 + sway(t, 3, 0.4) * 16} ${level + 48}h70M${420 - sway(t, 3) * 10} ${level + 20}h60`,
-      ink.white,
-      4,
-      0.6,
-    )
-  const lower = path('M760 566H1280V640H700Z', { fill: ink.water })
-  const bank =
-    path('M430 540L540 300H720L850 600V720H330Z', { fill: ink.soil }) +
-    path('M524 330L540 300H720L740 346Q630 322 524 330Z', { fill: '#7f9a5c' })
-  const gap = rect(560, 330, 90, 210, ink.soilWet)
-  const apron = path('M552 540H664L810 602V720H552Z', { fill: ink.plankDark })
-  const frame =
-    rect(546, 250, 18, 296, ink.plankDark) +
-    rect(646, 250, 18, 296, ink.plankDark) +
-    rect(546, 244, 118, 18, ink.plankDark)
   const board =
     rect(562, 380 - lifted, 86, 160, ink.plank) +
     stroke(`M562 ${430 - lifted}h86M562 ${486 - lifted}h86`, ink.plankDark, 4)
-  const staff =
-    rect(300, 280, 30, 262, ink.white) +
-    stroke(
-      many(9, (i) => `M300 ${300 + i * 26}h${i % 2 ? 14 : 22}`),
-      ink.mark,
-      4,
-    )
-  const beyond = rect(0, 0, 1280, 300, ink.sky) + path('M0 260Q300 150 620 210T1280 170V340H0Z', { fill: ink.trees })
   return (
     beyond +
-    rect(0, 300, 1280, 420, '#8aa566') +
-    upper +
-    lower +
-    path('M0 540H440V720H0Z', { fill: ink.soilDark }) +
-    rect(700, 636, 580, 84, ink.soilDark) +
-    bank +
-    gap +
-    apron +
+    heldWater(level, t) +
+    theLevee +
     jet +
-    frame +
+    gateFrame +
     board +
     staff +
     spray +
@@ -99,51 +103,55 @@ export const leveeGate: Scene = ({ t, of, line, since }) => {
   )
 }
 
+const tub =
+  path('M150 420H590L550 640H190Z', { fill: ink.iron }) + path('M176 440H564L552 500H188Z', { fill: ink.waterDeep })
+const tray = rect(750, 430, 440, 230, ink.ironDark)
+
+/** `sprout` from 0 to 1 is how far its root tip shows. */
+function soakedSeed(i: number, sprout: number): string {
+  const x = 800 + (i % 5) * 84
+  const y = 470 + Math.floor(i / 5) * 66
+  const root = stroke(
+    `M${x + 24} ${y}q${14 * sprout} ${6 + (i % 3) * 6} ${(10 + (i % 4) * 5) * sprout} ${4 * sprout}`,
+    ink.white,
+    6 * sprout + 0.1,
+  )
+  return (
+    root +
+    at(x, y, oval(0, 0, 27, 12, { fill: '#d2b878' }) + stroke('M-18 -3Q0 -9 18 -3', '#a98f55', 3), {
+      turn: ((i * 29) % 30) - 15,
+    })
+  )
+}
+
+const sack = (y: number) =>
+  at(
+    370,
+    y,
+    path('M-120 190Q-150 40 -60 0H60Q150 40 120 190Q0 220 -120 190Z', { fill: '#c9b28c' }) +
+      stroke('M-60 0Q0 16 60 0M-34 -30Q0 6 34 -30', '#8f7650', 8) +
+      stroke('M-90 60q90 26 180 0M-104 116q104 28 208 0', '#b39c74', 4),
+  )
+
 /** A sack of seed in the tub: bubbles, then out of the water with root tips showing. */
 export const seedSoak: Scene = ({ t, line, since }) => {
   const out = line >= 1 ? 1 : 0
   const sprout = line >= 2 ? 1 : line === 1 ? ramp(since, 0.5, 3) : 0
-  const seeds = many(15, (i) => {
-    const x = 800 + (i % 5) * 84
-    const y = 470 + Math.floor(i / 5) * 66
-    const root = stroke(
-      `M${x + 24} ${y}q${14 * sprout} ${6 + (i % 3) * 6} ${(10 + (i % 4) * 5) * sprout} ${4 * sprout}`,
-      ink.white,
-      6 * sprout + 0.1,
-    )
-    return (
-      root +
-      at(x, y, oval(0, 0, 27, 12, { fill: '#d2b878' }) + stroke('M-18 -3Q0 -9 18 -3', '#a98f55', 3), {
-        turn: ((i * 29) % 30) - 15,
-      })
-    )
-  })
   const bubbles = out
     ? ''
     : many(12, (i) =>
         dot(210 + ((i * 71) % 320), 496 - ((t * 18 + i * 17) % 48), 4 + (i % 3) * 2, ink.white, { opacity: 0.7 }),
       )
-  const sackY = 300 - out * 130
-  const sack = at(
-    370,
-    sackY,
-    path('M-120 190Q-150 40 -60 0H60Q150 40 120 190Q0 220 -120 190Z', { fill: '#c9b28c' }) +
-      stroke('M-60 0Q0 16 60 0M-34 -30Q0 6 34 -30', '#8f7650', 8) +
-      stroke('M-90 60q90 26 180 0M-104 116q104 28 208 0', '#b39c74', 4),
-  )
   const drips = out ? many(6, (i) => dot(290 + i * 32, 400 + ((t * 120 + i * 53) % 110), 6, ink.waterDeep)) : ''
-  const tub =
-    path('M150 420H590L550 640H190Z', { fill: ink.iron }) + path('M176 440H564L552 500H188Z', { fill: ink.waterDeep })
-  const tray = rect(750, 430, 440, 230, ink.ironDark)
   return (
     bench(380) +
-    sack +
+    sack(300 - out * 130) +
     tub +
     (out ? '' : at(0, 0, path('M184 470Q370 452 556 470L550 500H190Z', { fill: ink.water, opacity: 0.8 }))) +
     bubbles +
     drips +
     tray +
-    seeds
+    many(15, (i) => soakedSeed(i, sprout))
   )
 }
 

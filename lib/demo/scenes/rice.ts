@@ -3,27 +3,22 @@ import { at, dot, ink, many, path, ramp, rect, stroke, sway, type Scene } from '
 import { label } from './lettering'
 import { panicle, panicleLength, roots } from './plants'
 
+const wall = path('M520 640Q500 320 552 -20H728Q780 320 760 640Q700 690 640 690T520 640Z', { fill: ink.leaf })
+const inner = path('M574 620Q562 320 598 -20H682Q718 320 706 620Q670 648 640 648T574 620Z', { fill: '#eef0d8' })
+const youngPanicle =
+  path('M0 -90Q26 -50 16 0H-16Q-26 -50 0 -90Z', { fill: '#f7f4e4', stroke: ink.leafLight, width: 5 }) +
+  stroke('M-10 -20q10 -10 20 0M-12 -40q12 -10 24 0M-8 -60q8 -8 16 0', ink.leafLight, 3)
+const plates = stroke('M574 600Q640 574 706 600', ink.leafDark, 9)
+
 /** A split stem: the ring of green at its foot, then the panicle of two millimetres. */
 export const greenRingScene: Scene = ({ t, line, since }) => {
-  const wall = path('M520 640Q500 320 552 -20H728Q780 320 760 640Q700 690 640 690T520 640Z', { fill: ink.leaf })
-  const inner = path('M574 620Q562 320 598 -20H682Q718 320 706 620Q670 648 640 648T574 620Z', { fill: '#eef0d8' })
   const pulse = line === 0 ? 0.4 + 0.6 * Math.abs(sway(t, 2)) : 1
   const ring = path('M572 560Q640 532 708 560V582Q640 554 572 582Z', {
     fill: '#6faa4a',
     opacity: line === 0 && t < 2 ? 0.3 : pulse,
   })
   const grown = line < 2 ? 0.35 : line === 2 ? 0.35 + 0.65 * ramp(since, 0, 2.5) : 1
-  const young =
-    line >= 1
-      ? at(
-          640,
-          548,
-          path('M0 -90Q26 -50 16 0H-16Q-26 -50 0 -90Z', { fill: '#f7f4e4', stroke: ink.leafLight, width: 5 }) +
-            stroke('M-10 -20q10 -10 20 0M-12 -40q12 -10 24 0M-8 -60q8 -8 16 0', ink.leafLight, 3),
-          { scale: grown },
-        )
-      : ''
-  const plates = stroke('M574 600Q640 574 706 600', ink.leafDark, 9)
+  const young = line >= 1 ? at(640, 548, youngPanicle, { scale: grown }) : ''
   const wind = sway(t, 3) * 8
   const leaves = path(
     `M526 360Q440 230 ${330 + wind} 96Q392 300 522 450ZM752 330Q840 220 ${952 - wind} 110Q886 280 758 420Z`,
@@ -44,27 +39,14 @@ export const greenRingScene: Scene = ({ t, line, since }) => {
   )
 }
 
-/** The tube in the mud, cut open: the water inside falls below the ground, then the flood returns. */
-export const waterTube: Scene = ({ t, of, line, since }) => {
-  const ground = 380
-  const back = line >= 2 ? ramp(since, 3, 6) : 0
-  const level = ground - 66 + (1 - back) * 210 * ramp(t, 1, of * 0.5)
-  const flood =
-    back > 0
-      ? rect(0, ground - 66 * back, 1280, 66 * back, ink.water)
-      : level < ground
-        ? rect(0, level, 1280, ground - level, ink.water)
-        : ''
-  const soil =
-    rect(0, ground, 1280, 340, ink.soilDark) +
-    many(40, (i) => dot((i * 137) % 1280, ground + 24 + ((i * 59) % 300), 4 + (i % 4), ink.furrow))
-  const wet = rect(0, Math.max(level, ground), 1280, 720, ink.soilWet, { opacity: 0.55 })
-  const tube =
-    rect(560, 240, 160, 400, ink.white, { opacity: 0.92 }) +
-    rect(572, Math.max(level, 250), 136, 628 - Math.max(level, 250), ink.waterDeep) +
-    stroke('M560 240V640H720V240', ink.ironDark, 8)
-  const holes = many(24, (i) => dot(i % 2 ? 560 : 720, ground + 24 + Math.floor(i / 2) * 19, 5, ink.ironDark))
-  const plants = many(8, (i) => {
+const ground = 380
+
+const soil =
+  rect(0, ground, 1280, 340, ink.soilDark) +
+  many(40, (i) => dot((i * 137) % 1280, ground + 24 + ((i * 59) % 300), 4 + (i % 4), ink.furrow))
+
+const standing = (t: number) =>
+  many(8, (i) => {
     const x = [60, 180, 300, 430, 860, 980, 1100, 1220][i] ?? 0
     return (
       stroke(
@@ -74,13 +56,30 @@ export const waterTube: Scene = ({ t, of, line, since }) => {
       ) + roots(x, ground, 120)
     )
   })
+
+/** The tube in the mud, cut open: the water inside falls below the ground, then the flood returns. */
+export const waterTube: Scene = ({ t, of, line, since }) => {
+  const back = line >= 2 ? ramp(since, 3, 6) : 0
+  const level = ground - 66 + (1 - back) * 210 * ramp(t, 1, of * 0.5)
+  const flood =
+    back > 0
+      ? rect(0, ground - 66 * back, 1280, 66 * back, ink.water)
+      : level < ground
+        ? rect(0, level, 1280, ground - level, ink.water)
+        : ''
+  const wet = rect(0, Math.max(level, ground), 1280, 720, ink.soilWet, { opacity: 0.55 })
+  const tube =
+    rect(560, 240, 160, 400, ink.white, { opacity: 0.92 }) +
+    rect(572, Math.max(level, 250), 136, 628 - Math.max(level, 250), ink.waterDeep) +
+    stroke('M560 240V640H720V240', ink.ironDark, 8)
+  const holes = many(24, (i) => dot(i % 2 ? 560 : 720, ground + 24 + Math.floor(i / 2) * 19, 5, ink.ironDark))
   return (
     rect(0, 0, 1280, ground, ink.haze) +
     path('M0 250Q320 130 640 200T1280 160V380H0Z', { fill: ink.farTrees }) +
     soil +
     wet +
     flood +
-    plants +
+    standing(t) +
     tube +
     holes
   )

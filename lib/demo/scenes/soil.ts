@@ -43,9 +43,29 @@ const gauge = (x: number, y: number) =>
       stroke('M-44 -256L-32 -246V-38H32V-246L44 -256', ink.ironDark, 5),
   )
 
+const cutSurface = 230
+const rule = at(
+  1010,
+  cutSurface,
+  rect(0, 0, 74, 470, ink.paper) +
+    stroke(
+      many(10, (i) => `M0 ${i * 50 + 1}h${i % 2 ? 24 : 42}`),
+      ink.ironDark,
+      4,
+    ),
+)
+const spade = at(
+  240,
+  cutSurface + 36,
+  rect(-9, -230, 18, 250, ink.plankDark) +
+    stroke('M-34 -232H34', ink.ironDark, 16) +
+    path('M-48 0H48V120Q30 190 0 204Q-30 190 -48 120Z', { fill: ink.ironLight }),
+  { turn: 4 },
+)
+
 /** The dark band sinks through the cut ground to 200 mm on the rule (1 mm is 2 units). */
 export const wettingFront: Scene = ({ t, line, since }) => {
-  const surface = 230
+  const surface = cutSurface
   const sunk = line < 3 ? 0.55 * ramp(t, 1, 12) : line === 3 ? 0.55 + 0.45 * ramp(since, 0, 4) : 1
   const depth = 400 * sunk
   const edge = surface + depth
@@ -56,28 +76,28 @@ export const wettingFront: Scene = ({ t, line, since }) => {
     const fall = ((t * 0.5 + next()) % 1) * depth
     return dot(x, surface + fall, 4, ink.water, { opacity: depth > 60 ? 0.8 : 0 })
   })
-  const rule = at(
-    1010,
-    surface,
-    rect(0, 0, 74, 470, ink.paper) +
-      stroke(
-        many(10, (i) => `M0 ${i * 50 + 1}h${i % 2 ? 24 : 42}`),
-        ink.ironDark,
-        4,
-      ),
-  )
-  const spade = at(
-    240,
-    surface + 36,
-    rect(-9, -230, 18, 250, ink.plankDark) +
-      stroke('M-34 -232H34', ink.ironDark, 16) +
-      path('M-48 0H48V120Q30 190 0 204Q-30 190 -48 120Z', { fill: ink.ironLight }),
-    { turn: 4 },
-  )
   const shown = line > 3 || (line === 3 && since > 3) ? label(690, edge - 92, '200 mm') : ''
   return (
     sky(surface) + cutting(surface) + path(front, { fill: ink.soilWet, opacity: 0.6 }) + drops + rule + spade + shown
   )
+}
+
+const board =
+  path('M150 500L230 250H1050L1130 500Z', { fill: ink.plank }) + path('M150 500H1130V530H150Z', { fill: ink.plankDark })
+const grain = stroke(
+  'M220 330Q640 310 1060 330M200 400Q640 384 1080 400M180 460Q640 446 1104 460',
+  ink.plankDark,
+  3,
+  0.5,
+)
+
+/** The thread, in nine lengths that come apart as it breaks. */
+function pieces(half: number, thick: number, broken: number, colour: string): string {
+  return many(9, (i) => {
+    const x = -half + (i * half * 2) / 8
+    const drop = broken * (i % 2 ? 12 : -8)
+    return stroke(`M${x} ${drop}l${((half * 2) / 8) * (1 - 0.28 * broken)} ${broken * (i % 3 ? 5 : -5)}`, colour, thick)
+  })
 }
 
 /** A thread of soil rolled out on a board; at the plastic limit it breaks into pieces. */
@@ -87,24 +107,6 @@ export const thread: Scene = ({ t, line, since }) => {
   const thick = 64 - 44 * rolled
   const broken = line === 1 ? ramp(since, 2.5, 4) : line === 3 ? 1 : 0
   const half = 120 + 220 * rolled + (long ? 90 * ramp(since, 0, 2) : 0)
-  const pieces = many(9, (i) => {
-    const x = -half + (i * half * 2) / 8
-    const drop = broken * (i % 2 ? 12 : -8)
-    return stroke(
-      `M${x} ${drop}l${((half * 2) / 8) * (1 - 0.28 * broken)} ${broken * (i % 3 ? 5 : -5)}`,
-      long ? ink.soilWet : ink.soilDark,
-      thick,
-    )
-  })
-  const board =
-    path('M150 500L230 250H1050L1130 500Z', { fill: ink.plank }) +
-    path('M150 500H1130V530H150Z', { fill: ink.plankDark })
-  const grain = stroke(
-    'M220 330Q640 310 1060 330M200 400Q640 384 1080 400M180 460Q640 446 1104 460',
-    ink.plankDark,
-    3,
-    0.5,
-  )
   const shown = line >= 1 ? label(884, 560, '3 mm') + stroke('M900 540V430', ink.plate, 4) : ''
   const hand = palm(
     640 + sway(t, 1.6) * 70 * (line === 0 || long ? 1 : 0),
@@ -115,7 +117,7 @@ export const thread: Scene = ({ t, line, since }) => {
     path('M0 560Q320 530 640 556T1280 540V720H0z', { fill: ink.farTrees, opacity: 0.6 }) +
     board +
     grain +
-    at(640, 400, pieces) +
+    at(640, 400, pieces(half, thick, broken, long ? ink.soilWet : ink.soilDark)) +
     hand +
     shown
   )
