@@ -1,16 +1,26 @@
+import { randomInt } from 'node:crypto'
 import { once } from 'node:events'
-import { createServer, type AddressInfo } from 'node:net'
+import { createServer, type Server } from 'node:net'
+
+/** Below where Linux takes ports for outgoing connections (32768 up): one that is free now is not taken by chance. */
+const [FIRST, LAST] = [20_000, 32_000]
+
+async function listenSomewhere(): Promise<{ server: Server; port: number }> {
+  for (let left = 50; ; left--) {
+    const port = randomInt(FIRST, LAST)
+    const server = createServer().listen(port, '127.0.0.1')
+    try {
+      await once(server, 'listening')
+      return { server, port }
+    } catch (failure) {
+      if (left === 0) throw failure
+    }
+  }
+}
 
 /** Ports on loopback that nobody holds at this moment, all different. */
 export async function freePorts(count: number): Promise<number[]> {
-  const servers = await Promise.all(
-    Array.from({ length: count }, async () => {
-      const server = createServer().listen(0, '127.0.0.1')
-      await once(server, 'listening')
-      return server
-    }),
-  )
-  const ports = servers.map((server) => (server.address() as AddressInfo).port)
-  await Promise.all(servers.map((server) => new Promise((closed) => server.close(closed))))
-  return ports
+  const taken = await Promise.all(Array.from({ length: count }, listenSomewhere))
+  await Promise.all(taken.map(({ server }) => new Promise((closed) => server.close(closed))))
+  return taken.map(({ port }) => port)
 }

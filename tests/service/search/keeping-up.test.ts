@@ -151,7 +151,7 @@ it('an index made anew holds what the one kept up change by change held', async 
 
 it('a change to a search without its index makes the whole index', async () => {
   const client = new Meilisearch({ host: env().SEARCH_URL, apiKey: env().SEARCH_KEY })
-  await client.deleteIndex(INDEX).waitTask()
+  await client.deleteIndex(INDEX).waitTask({ timeout: 25_000 })
   expect((await ask('q=concave')).status).toBe(503)
   const changes = [1, 2, 3].map(() => refreshSearchOf({ kind: 'term', id: crypto.randomUUID() }))
   await Promise.all(changes)

@@ -15,7 +15,7 @@ export async function searchTrial() {
   return {
     host,
     directory,
-    client: new Meilisearch({ host, apiKey: where.key }),
+    client: new Meilisearch({ host, apiKey: where.key, defaultWaitOptions: { timeout: 25_000 } }),
     async restart(meanwhile = async () => {}) {
       await fake.stop()
       await meanwhile()
