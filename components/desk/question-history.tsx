@@ -21,7 +21,9 @@ export function QuestionHistory({ events }: { events: QuestionEventView[] }) {
   if (events.length === 0) return null
   return (
     <details className="border-t border-rule-2 pt-3">
-      <summary className="flex min-h-11 items-center text-water underline">History, {events.length} entries</summary>
+      <summary className="flex min-h-11 items-center text-water underline">
+        History, {events.length} {events.length === 1 ? 'entry' : 'entries'}
+      </summary>
       <ol className="ruled mt-1 text-sm">
         {events.map(({ id, move, by, on, detail }) => (
           <li key={id} className="py-2">

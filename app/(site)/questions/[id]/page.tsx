@@ -41,7 +41,9 @@ export default async function QuestionPage({ params }: Props) {
           {followUp && youAreAsking && <VerdictForm id={id} />}
         </div>
         <aside className="sheet grid gap-4 px-5 py-4" aria-label="About this question">
-          <AskedStage question={question} whole />
+          <div>
+            <AskedStage question={question} whole />
+          </div>
           <AskingButton question={question} signedIn={isPerson(actor)} />
           <Link href={`/channels/${channel.slug}/questions`}>All questions to {channel.name}</Link>
         </aside>
