@@ -39,14 +39,18 @@ const foreign = [
   'MAIL_FROM',
 ]
 
+async function portsFor(names) {
+  const ports = new Set()
+  while (ports.size < names.length) ports.add(String(await freePort()))
+  return Object.fromEntries(names.map((name, index) => [name, [...ports][index]]))
+}
+
 /** A temporary folder, free ports and settings that touch nothing of an installation in the same place. */
 export async function makeBench(root, from) {
   const folder = mkdtempSync(path.join(tmpdir(), `${prefix}${process.pid}-`))
   // The postgres user must be able to walk through it to its cluster.
   chmodSync(folder, 0o711)
-  const ports = {}
-  for (const name of ['PORT', 'DATABASE_PORT', 'MAIL_SMTP_PORT', 'MAIL_PAGE_PORT', 'SEARCH_PORT'])
-    ports[name] = String(await freePort())
+  const ports = await portsFor(['PORT', 'DATABASE_PORT', 'MAIL_SMTP_PORT', 'MAIL_PAGE_PORT', 'SEARCH_PORT'])
   const own = Object.fromEntries(Object.entries(from).filter(([name]) => !foreign.includes(name)))
   const outside = { ...own, ...ports, DATA_DIR: path.join(folder, 'data'), NEXT_DIST_DIR: '.next-test' }
   mkdirSync(outside.DATA_DIR)
