@@ -23,6 +23,7 @@ export default defineConfig({
         resolve,
         test: {
           name: 'service',
+          env: { LOG_LEVEL: 'silent' },
           include: files('service'),
           globalSetup: ['tests/support/global-database.ts'],
           testTimeout: 30_000,

@@ -2,6 +2,7 @@ import { randomBytes } from 'node:crypto'
 import { mkdtempSync, rmSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import path from 'node:path'
+import { setTimeout as sleep } from 'node:timers/promises'
 import pg from 'pg'
 import { afterAll, beforeAll, inject } from 'vitest'
 import { settingsForTests } from './settings'
@@ -10,6 +11,17 @@ async function onAdmin(sql: string): Promise<void> {
   const client = new pg.Client({ connectionString: inject('adminUrl') })
   await client.connect()
   await client.query(sql).finally(() => client.end())
+}
+
+/** The server's own cleaning may hold a database for a moment, and only a superuser could send it away. */
+async function drop(name: string, left = 40): Promise<void> {
+  try {
+    await onAdmin(`drop database if exists ${name} with (force)`)
+  } catch (failure) {
+    if (left === 0) throw failure
+    await sleep(250)
+    await drop(name, left - 1)
+  }
 }
 
 /**
@@ -28,7 +40,7 @@ export function freshDatabase(): void {
   afterAll(async () => {
     const { db } = await import('@/lib/db')
     await db().close()
-    await onAdmin(`drop database if exists ${name} with (force)`)
+    await drop(name)
     rmSync(media, { recursive: true, force: true })
   })
 }

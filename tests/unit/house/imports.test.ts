@@ -12,7 +12,7 @@ const browserSafe =
   /^lib\/[\w-]+\/((?:[\w-]+-)?(schema|rules|views|hooks|actions)|way-back|parse|when|limits|stage-words|crops|cautions|client|actor)$/
 const libFree = /^lib\/(env|errors|clock|log)$/
 /** Files of media that start no process: what a request may use. */
-const mediaPure = /^media\/(sign|ranges|cues|webvtt|srt|caption-file|storage|failure|files)$/
+const mediaPure = /^media\/(sign|ranges|cues|webvtt|srt|caption-file|storage|failure|files|photos)$/
 const jobBody =
   /^lib\/[\w-]+\/(inspect|encode|reconcile|refresh|hear|load|publish|send|rebuild|draw|seed|sweep)-[\w-]+$/
 
