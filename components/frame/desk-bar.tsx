@@ -15,17 +15,17 @@ type DeskBarProps = {
 export function DeskBar({ channel, people }: DeskBarProps) {
   const pathname = usePathname()
   const links = deskLinks(pathname, channel.slug, people)
-  const bar = useRef<HTMLElement>(null)
+  const bar = useRef<HTMLDivElement>(null)
   useEffect(() => {
     // On a phone the bar is wider than the screen: the part one is in has to be in sight.
     const here = bar.current?.querySelector<HTMLElement>('[aria-current]')
     if (here && bar.current) bar.current.scrollLeft = here.offsetLeft - (bar.current.clientWidth - here.clientWidth) / 2
   }, [pathname])
   return (
-    <div className="no-print border-b border-rule bg-sheet">
+    <nav aria-label={`${channel.name} desk`} className="no-print border-b border-rule bg-sheet">
       <div className="page flex flex-wrap items-center gap-x-7 md:flex-nowrap">
         <p className="pt-2.5 font-display text-lg font-semibold whitespace-nowrap md:pt-0">{channel.name} desk</p>
-        <nav ref={bar} aria-label={`${channel.name} desk`} className="relative min-w-0 overflow-x-auto">
+        <div ref={bar} className="relative min-w-0 overflow-x-auto">
           <ul className="flex gap-7">
             {links.map(({ href, label, current }) => (
               <li key={href}>
@@ -39,8 +39,8 @@ export function DeskBar({ channel, people }: DeskBarProps) {
               </li>
             ))}
           </ul>
-        </nav>
+        </div>
       </div>
-    </div>
+    </nav>
   )
 }

@@ -16,7 +16,12 @@ const marks: Record<StageKey, ReactNode> = {
   5: <path className="line" d="M0 6L3 2L6 6L9 2L12 6M0 12L3 8L6 12L9 8L12 12" strokeWidth="1.2" />,
   6: <path className="line" d="M6 3.6a2.4 2.4 0 1 0 .01 0z" strokeWidth="1.3" />,
   7: <path className="dot" d="M3 1.4a1.4 2.6 0 1 0 .01 0zM9 6.4a1.4 2.6 0 1 0 .01 0z" />,
-  8: <path className="dot" d="M3 1.2a1.6 2.8 0 1 0 .01 0zM9 6.2a1.6 2.8 0 1 0 .01 0z" />,
+  8: (
+    <>
+      <path className="dot" d="M3 1.2a1.6 2.6 0 1 0 .01 0zM9 7.2a1.6 2.6 0 1 0 .01 0z" />
+      <path className="line" d="M3 6V9.5M9 0V3.5" strokeWidth="1.2" />
+    </>
+  ),
   9: <path className="line" d="M2 12V7M6 12V8M10 12V7" {...thick} />,
 }
 
