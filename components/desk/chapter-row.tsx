@@ -1,7 +1,5 @@
 import { Button } from '@/components/ui/button'
 import { TextField } from '@/components/ui/field'
-import { StagePatch } from '@/components/ui/stage-patch'
-import { stageOf } from '@/lib/topics/rules'
 import type { ChapterDraft } from './chapter-draft'
 import { TopicPicker } from './topic-picker'
 
@@ -17,7 +15,6 @@ type ChapterRowProps = {
 
 /** One chapter on the bench. The time is typed or taken from the film; nothing needs dragging. */
 export function ChapterRow({ draft, number, faults, current, onChange, onRemove, onWatch }: ChapterRowProps) {
-  const stage = stageOf(draft.topics)
   return (
     <li
       aria-label={`Chapter ${number}`}
@@ -38,12 +35,9 @@ export function ChapterRow({ draft, number, faults, current, onChange, onRemove,
         maxLength={60}
         onChange={(event) => onChange({ title: event.target.value })}
       />
-      <div className="grid grid-cols-[1.5rem_minmax(0,1fr)] items-start gap-3 md:col-start-2">
-        {stage ? <StagePatch stage={stage} className="mt-9 size-6" /> : <span aria-hidden="true" />}
-        <div>
-          <TopicPicker label="Topics" value={draft.topics} onChange={(topics) => onChange({ topics })} />
-          {faults.topics && <p className="mt-1.5 text-sm font-semibold text-fault">{faults.topics}</p>}
-        </div>
+      <div className="md:col-start-2">
+        <TopicPicker label="Topics" value={draft.topics} onChange={(topics) => onChange({ topics })} />
+        {faults.topics && <p className="mt-1.5 text-sm font-semibold text-fault">{faults.topics}</p>}
       </div>
       <div className="flex flex-wrap gap-2 md:col-start-2">
         <Button variant="quiet" onClick={onWatch}>

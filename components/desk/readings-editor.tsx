@@ -15,6 +15,7 @@ const fields = [
   { name: 'quantity', label: 'What was measured' },
   { name: 'value', label: 'Value' },
   { name: 'unit', label: 'Unit' },
+  { name: 'note', label: 'Note' },
 ] as const
 
 /** Measurements said on camera, each at its second. */
@@ -34,7 +35,10 @@ export function ReadingsEditor({ episode: first }: { episode: EpisodeView }) {
         <p className="text-ink-2">A measurement that is said: 19 plants per square foot at 3:08.</p>
       )}
       {drafts.map((draft, n) => (
-        <fieldset key={draft.key} className="grid gap-3 md:grid-cols-[6rem_minmax(0,1fr)_7rem_9rem_auto] md:items-end">
+        <fieldset
+          key={draft.key}
+          className="grid gap-3 md:grid-cols-[6rem_minmax(0,1fr)_6rem_8rem_minmax(0,1fr)_auto] md:items-end"
+        >
           <legend className="sr-only">Reading {n + 1}</legend>
           {fields.map(({ name, label }) => (
             <TextField

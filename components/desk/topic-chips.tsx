@@ -35,7 +35,12 @@ function TopicChip({ code, onRemove, onLeave }: Omit<TopicChipsProps, 'codes' | 
   const words = topic?.label ?? code
   return (
     <li className="inline-flex max-w-full items-stretch border border-rule bg-sheet text-sm leading-tight">
-      {topic?.stage && <StagePatch stage={topic.stage} className="h-auto w-5.5 self-stretch" />}
+      {topic?.stage && (
+        // An SVG left to its own height would be 150 px tall.
+        <span className="relative w-5.5 shrink-0">
+          <StagePatch stage={topic.stage} className="absolute inset-0 size-full" />
+        </span>
+      )}
       <span className="min-w-0 px-2 py-1.5">{words}</span>
       <button
         type="button"

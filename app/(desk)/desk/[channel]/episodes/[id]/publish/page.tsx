@@ -13,7 +13,7 @@ export default async function PublishPage({ params }: PageProps<'/desk/[channel]
   const { channel, id } = await params
   const actor = await currentActor()
   const episode = await forPage(readDeskEpisode(actor, channel, id))
-  const lines = await readWalkRound(actor, id)
+  const failing = (await readWalkRound(actor, id)).filter(({ ok }) => !ok)
   const base = `/desk/${channel}/episodes/${id}`
   return (
     <section aria-labelledby="publish" className="grid gap-5">
@@ -23,8 +23,8 @@ export default async function PublishPage({ params }: PageProps<'/desk/[channel]
       <p>
         <Link href={`${base}/answers`}>Questions this episode answers</Link>
       </p>
-      <WalkRoundList base={base} lines={lines} />
-      <PublishPanel episode={episode} ready={lines.every(({ ok }) => ok)} />
+      {failing.length > 0 && <WalkRoundList base={base} lines={failing} />}
+      <PublishPanel episode={episode} ready={failing.length === 0} />
     </section>
   )
 }
