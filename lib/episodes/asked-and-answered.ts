@@ -1,6 +1,7 @@
 import { QueryTypes } from 'sequelize'
 import { type Actor, deskChannelIds } from '@/lib/auth/actor'
 import { db } from '@/lib/db'
+import { ASKING } from '@/lib/questions/row-reads'
 import { type AnswerHereView, type AskedHereView, episodeUrl, inSeconds } from './views'
 
 type AskedRow = {
@@ -20,7 +21,7 @@ type AskedRow = {
 /** Questions asked on an episode, each with the answer that this actor may watch. Set-aside and joined ones are left out. */
 export async function askedOn(episodeId: string, actor: Actor): Promise<AskedHereView[]> {
   const rows = await db().query<AskedRow>(
-    `select q.id, q.title, q.state, q.at_ms, (select count(*) from askings where question_id = q.id) as asking,
+    `select q.id, q.title, q.state, q.at_ms, ${ASKING} as asking,
        a.start_ms, a.end_ms, e.number, e.title as episode_title, e.slug, c.slug as channel
      from questions q
      left join (answers a join episodes e on e.id = a.episode_id join channels c on c.id = e.channel_id)

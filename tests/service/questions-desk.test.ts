@@ -1,4 +1,6 @@
 import { beforeAll, beforeEach, describe, expect, it } from 'vitest'
+import { nobody } from '@/lib/auth/actor'
+import { askedOn } from '@/lib/episodes/asked-and-answered'
 import { Answer } from '@/models/answer'
 import { Asking } from '@/models/asking'
 import { Letter } from '@/models/letter'
@@ -126,6 +128,10 @@ describe('joining', () => {
     const joined = await move('join', question.id, farm.editor.id, { into: into.id })
     expect(await joined.json()).toMatchObject({ state: 'joined', joinedInto: { id: into.id } })
     expect(await (await look(into.id)).json()).toMatchObject({ asking: 3 })
+    // The people of both are told apart and counted the same on the episode it was asked on.
+    const episode = await makeEpisode(farm.channel, { state: 'published' })
+    await into.update({ episodeId: episode.id, atMs: 0 })
+    expect(await askedOn(episode.id, nobody)).toMatchObject([{ id: into.id, asking: 3 }])
     expect(await Asking.count({ where: { questionId: question.id } })).toBe(2)
     await move('queue', question.id, farm.editor.id)
     expect(await (await look(question.id)).json()).toMatchObject({ state: 'queued', joinedInto: null, asking: 2 })
