@@ -2,7 +2,7 @@
 
 import { useMemo, useRef, useState, type MouseEvent } from 'react'
 import { EmptyState } from '@/components/ui/empty-state'
-import { paragraphsOf, sentenceAt, sentencesIn, type CueText } from '@/lib/captions/rules'
+import { paragraphsOf, sentenceAt, sentencesIn, type CueText, type Passage, type Sentence } from '@/lib/captions/rules'
 import type { TermNotes } from '@/lib/handbook/views'
 import { FindInEpisode } from './find-in-episode'
 import { usePlayback, useMoment } from './playback-context'
@@ -57,7 +57,7 @@ export function AsSpoken({ spoken, chapters, corrections, notes }: AsSpokenProps
             chapter={chapters[passage.chapter ?? -1] ?? null}
             corrections={corrections}
             notes={notes}
-            now={sentences[now]?.start ?? null}
+            now={startWithin(passage, sentences[now])}
             takeTurns={takeTurns}
           />
         ))}
@@ -65,6 +65,14 @@ export function AsSpoken({ spoken, chapters, corrections, notes }: AsSpokenProps
       {!following && passages.length > 0 && <FollowButton onPress={resume} />}
     </div>
   )
+}
+
+/** Null in every passage but the one being spoken, so that the others are not drawn again. */
+function startWithin({ paragraphs }: Passage, sentence: Sentence | undefined): number | null {
+  if (!sentence) return null
+  const from = paragraphs[0]?.start ?? Infinity
+  const to = paragraphs.at(-1)?.end ?? -Infinity
+  return sentence.start >= from && sentence.start <= to ? sentence.start : null
 }
 
 function FollowButton({ onPress }: { onPress: () => void }) {

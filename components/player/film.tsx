@@ -1,11 +1,12 @@
 'use client'
 
 import { useRef, type KeyboardEvent } from 'react'
+import { TimeCode } from '@/components/ui/time-code'
 import { FilmControls } from './film-controls'
 import { FilmNotice } from './film-notice'
 import { useKeptChoice } from './kept-choice'
 import { asChoice, pictureOptions, type FilmSize } from './picture-sizes'
-import { usePlayback } from './playback-context'
+import { useMoment, usePlayback } from './playback-context'
 import { placeAfterKey } from './player-keys'
 import { useFilm } from './use-film'
 import { useHydrated } from '@/components/ui/use-hydrated'
@@ -63,7 +64,7 @@ export function Film({ title, film, captions, openAt }: FilmProps) {
         </video>
         <FilmNotice soundOnly={size === 'sound'} />
       </div>
-      {scripted && (
+      {scripted ? (
         <FilmControls
           frame={frame}
           video={video}
@@ -75,8 +76,22 @@ export function Film({ title, film, captions, openAt }: FilmProps) {
           language={language}
           onLanguage={keepLanguage}
         />
+      ) : (
+        <RestingBar />
       )}
     </div>
+  )
+}
+
+/** The place of the controls until the page answers, so that nothing moves when they come. */
+function RestingBar() {
+  const duration = useMoment((moment) => moment.duration)
+  return (
+    <p className="flex min-h-12 items-center px-3.5 text-sm @min-[44rem]:px-4.5">
+      <span>
+        Length <TimeCode seconds={duration} />
+      </span>
+    </p>
   )
 }
 

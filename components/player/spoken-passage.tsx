@@ -11,13 +11,14 @@ type SpokenPassageProps = {
   chapter: RowChapter | null
   corrections: RowCorrection[]
   notes: TermNotes
-  /** The start of the sentence being spoken, in seconds; it may lie in another passage. */
+  /** The start of the sentence being spoken, in seconds; null while that is none of this passage. */
   now: number | null
   takeTurns: boolean
 }
 
 /** The paragraphs of one chapter under its title. */
-export function SpokenPassage({ passage, chapter, corrections, notes, now, takeTurns }: SpokenPassageProps) {
+export const SpokenPassage = memo(function SpokenPassage(props: SpokenPassageProps) {
+  const { passage, chapter, corrections, notes, now, takeTurns } = props
   return (
     <section>
       {chapter && <PassageTitle title={chapter.title} stage={chapter.stage} />}
@@ -38,7 +39,7 @@ export function SpokenPassage({ passage, chapter, corrections, notes, now, takeT
       ))}
     </section>
   )
-}
+})
 
 /** A correction follows the paragraph it is pinned in, also when it is pinned to the silence after it. */
 function belongsTo(at: number, paragraph: Paragraph, next: Paragraph | undefined): boolean {
