@@ -14,7 +14,8 @@ export function StepStrip({ channel, episode: first }: StepStripProps) {
   const base = `/desk/${channel}/episodes/${episode.id}`
   const here = usePathname()
   return (
-    <nav aria-label="Steps of this episode" className="sheet overflow-x-auto">
+    // `relative` keeps words for screen readers, which are placed absolutely, inside what scrolls.
+    <nav aria-label="Steps of this episode" className="sheet relative overflow-x-auto">
       <ol className="grid min-w-[46rem] grid-cols-5 divide-x divide-rule">
         {deskSteps(episode).map(({ slug, title, stands, done }) => {
           const href = `${base}/${slug}`

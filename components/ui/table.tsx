@@ -12,7 +12,7 @@ type TableProps = {
 /** A ruled table on a sheet. Too wide for the screen, it scrolls inside its own box, from the keyboard too. */
 export function Table({ caption, showCaption, children, className }: TableProps) {
   return (
-    <div role="region" aria-label={caption} tabIndex={0} className="sheet overflow-x-auto">
+    <div role="region" aria-label={caption} tabIndex={0} className="sheet relative overflow-x-auto">
       <table className={classNames('w-full border-collapse text-left', className)}>
         <caption className={showCaption ? 'px-3.5 py-2.5 text-left font-semibold' : 'sr-only'}>{caption}</caption>
         {children}
