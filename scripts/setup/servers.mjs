@@ -30,8 +30,6 @@ const worker = ({ root }) => ({
   name: 'worker',
   args: script(root, 'scripts/worker.ts'),
   nodeEnv: 'production',
-  // Encoding fills every core; people who read and watch go first.
-  niceness: 5,
   isReady: (said) => said.includes('Worker is ready.'),
   stopSeconds: 25,
 })

@@ -1,6 +1,5 @@
 import { spawn } from 'node:child_process'
 import { closeSync, fstatSync, mkdirSync, openSync, readFileSync, renameSync, statSync } from 'node:fs'
-import { setPriority } from 'node:os'
 import path from 'node:path'
 import { setTimeout as sleep } from 'node:timers/promises'
 import { endGroup } from './run.mjs'
@@ -34,7 +33,7 @@ export class SupervisedServer {
 
   /**
    * `plan`: { name, args (after node), cwd, env, logFile, isReady(what this life has written to its log) → boolean,
-   * loud? (output to the terminal instead), readySeconds?, niceness?, isStopping?, onPid? }
+   * loud? (output to the terminal instead), readySeconds?, isStopping?, onPid? }
    */
   constructor(plan) {
     this.plan = { loud: false, readySeconds: 90, isStopping: () => false, onPid: () => {}, ...plan }
@@ -71,7 +70,7 @@ export class SupervisedServer {
   }
 
   #launch() {
-    const { args, cwd, env, logFile, loud, niceness, onPid } = this.plan
+    const { args, cwd, env, logFile, loud, onPid } = this.plan
     const log = loud ? 'inherit' : openLog(logFile)
     if (!loud) this.#logFrom = fstatSync(log).size
     // A group of its own (detached): Ctrl-C must reach us alone, for the order of the end is ours.
@@ -79,7 +78,6 @@ export class SupervisedServer {
     const child = spawn(process.execPath, ['--import', followParent, ...args], options)
     if (!loud) closeSync(log)
     this.#child = child
-    if (niceness && child.pid) setPriority(child.pid, niceness)
     onPid(child.pid)
     const since = performance.now()
     this.#ended = new Promise((resolve) => child.once('exit', resolve))
