@@ -1,12 +1,16 @@
 import type { Actor } from '@/lib/auth/actor'
 
 /** What the frame says of the person who is signed in. */
-export type FramePerson = { name: string; desks: { slug: string; name: string }[] }
+export type FramePerson = { name: string; isAdmin: boolean; desks: { slug: string; name: string }[] }
 
 /** As much of the actor as the browser gets; null for somebody who is not signed in. */
 export function framePerson(actor: Actor): FramePerson | null {
   if (actor.id === null) return null
-  return { name: actor.name, desks: actor.memberships.map(({ slug, channelName }) => ({ slug, name: channelName })) }
+  return {
+    name: actor.name,
+    isAdmin: actor.isAdmin,
+    desks: actor.memberships.map(({ slug, channelName }) => ({ slug, name: channelName })),
+  }
 }
 
 const titles = /^(dr|prof|mr|mrs|ms|sr|sra)\.?$/i

@@ -27,6 +27,13 @@ export function PersonLinks({ person, className }: { person: FramePerson | null;
           </Link>
         </li>
       ))}
+      {person.isAdmin && (
+        <li>
+          <Link href="/admin" className={item}>
+            This installation
+          </Link>
+        </li>
+      )}
       <li>
         <Link href="/account" className={item}>
           Your account

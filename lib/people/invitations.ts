@@ -17,25 +17,34 @@ import type { InvitationInput } from './schema'
 
 const DAYS_OPEN = 14
 
-/** Asks somebody into a channel by letter. A second invitation replaces the first. */
-export async function invite(actor: Actor, slug: string, { email, role }: InvitationInput): Promise<void> {
-  const channel = permit(actor, 'channel.people', await channelBySlug(slug))
-  const { id: invitedBy, name } = requirePerson(actor)
+type Inviter = { id: string; name: string }
+
+/** The same for a caller who has already been let through. */
+export async function inviteTo(
+  channel: Channel,
+  { id: invitedBy, name }: Inviter,
+  { email, role }: InvitationInput,
+  transaction: Transaction,
+): Promise<void> {
   const token = randomBytes(32).toString('base64url')
-  await inTransaction(async (transaction) => {
-    await Invitation.destroy({ where: { channelId: channel.id, email, acceptedAt: null }, transaction })
-    const expiresAt = new Date(now().getTime() + DAYS_OPEN * 86_400_000)
-    const row = await Invitation.create(
-      { channelId: channel.id, email, role, tokenHash: hashToken(token), invitedBy, expiresAt },
-      { transaction },
-    )
-    const text = [
-      `${name} asks you to work at the desk of ${channel.name} as ${role}.`,
-      `To accept, within ${DAYS_OPEN} days:\n${env().BASE_URL}/join/${token}`,
-    ].join('\n\n')
-    const subject = `${channel.name} asks you to its desk`
-    await post({ key: `invitation:${row.id}`, to: { address: email }, subject, text }, { transaction })
-  })
+  await Invitation.destroy({ where: { channelId: channel.id, email, acceptedAt: null }, transaction })
+  const expiresAt = new Date(now().getTime() + DAYS_OPEN * 86_400_000)
+  const row = await Invitation.create(
+    { channelId: channel.id, email, role, tokenHash: hashToken(token), invitedBy, expiresAt },
+    { transaction },
+  )
+  const text = [
+    `${name} asks you to work at the desk of ${channel.name} as ${role}.`,
+    `To accept, within ${DAYS_OPEN} days:\n${env().BASE_URL}/join/${token}`,
+  ].join('\n\n')
+  const subject = `${channel.name} asks you to its desk`
+  await post({ key: `invitation:${row.id}`, to: { address: email }, subject, text }, { transaction })
+}
+
+/** Asks somebody into a channel by letter. A second invitation replaces the first. @throws Problem 403, 404 */
+export async function invite(actor: Actor, slug: string, invitation: InvitationInput): Promise<void> {
+  const channel = permit(actor, 'channel.people', await channelBySlug(slug))
+  await inTransaction((transaction) => inviteTo(channel, requirePerson(actor), invitation, transaction))
 }
 
 const openInvitation = (token: string, transaction?: Transaction) =>

@@ -1,4 +1,6 @@
 import type { Routes } from '@/lib/http/openapi'
+import * as adminPeople from '../admin/people/route'
+import * as adminPeopleId from '../admin/people/[id]/route'
 import * as channels from '../channels/route'
 import * as channelsChannel from '../channels/[channel]/route'
 import * as channelsChannelEpisodes from '../channels/[channel]/episodes/route'
@@ -46,6 +48,8 @@ import * as topics from '../topics/route'
 
 /** Every route of the API by its address. A unit test holds this list against the folder. */
 export const routes: Routes = {
+  '/api/admin/people': adminPeople,
+  '/api/admin/people/{id}': adminPeopleId,
   '/api/channels': channels,
   '/api/channels/{channel}': channelsChannel,
   '/api/channels/{channel}/episodes': channelsChannelEpisodes,
