@@ -11,12 +11,12 @@ import { FootageFilm } from './footage-film'
 import { FootageSending } from './footage-sending'
 import { useSending } from './use-sending'
 
-type FootageDeskProps = { episodeId: string; first: FootageStatus | null; maySend: boolean }
+type FootageDeskProps = { episodeId: string; first: FootageStatus | null; hasFilm: boolean; maySend: boolean }
 
 const firstHint =
   'The file from the phone or camera itself: MP4, MOV, MKV, WebM, AVI or MTS, up to six hours. On a metered line, mind that the whole file is sent once.'
 
-function dropWords(footage: FootageStatus | null | undefined) {
+function dropWords(footage: FootageStatus | null | undefined, hasFilm: boolean) {
   if (footage?.state === 'receiving') {
     return {
       title: `Go on with ${footage.filename}`,
@@ -27,13 +27,13 @@ function dropWords(footage: FootageStatus | null | undefined) {
   if (!footage) return { title: 'Drop the film here', hint: firstHint, choose: 'Choose a film' }
   return {
     title: 'Send another film in its place',
-    hint: 'The film that is shown now stays until the new one is whole. Chapters, captions and readings are kept as they are.',
+    hint: `${hasFilm ? 'The film that is shown now stays until the new one is whole. ' : ''}Chapters, captions and readings are kept as they are.`,
     choose: 'Choose a film',
   }
 }
 
 /** The footage step: send a film, see it being made, replace it. */
-export function FootageDesk({ episodeId, first, maySend }: FootageDeskProps) {
+export function FootageDesk({ episodeId, first, hasFilm, maySend }: FootageDeskProps) {
   const { footage, isLost } = useFootage(episodeId, first)
   const { sending, state } = useSending(episodeId)
   const changed = useFootageChanged(episodeId)
@@ -59,7 +59,7 @@ export function FootageDesk({ episodeId, first, maySend }: FootageDeskProps) {
         <Failed episodeId={episodeId} footage={footage} maySend={maySend} />
       )}
       {footage && !['receiving', 'failed'].includes(footage.state) && <FootageFilm footage={footage} />}
-      {maySend && !isSending && <FootageDrop {...dropWords(footage)} onFile={take} />}
+      {maySend && !isSending && <FootageDrop {...dropWords(footage, hasFilm)} onFile={take} />}
       {!maySend && !footage && (
         <p className="text-ink-2">No film has been sent yet. The owner or an editor sends it.</p>
       )}

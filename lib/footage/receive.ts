@@ -6,7 +6,7 @@ import { checksumAlgorithms, parseChecksum, withCheckedChunk } from './checked-c
 import { readOwnUpload } from './reads'
 import { parseUploadMetadata } from './schema'
 import { idHeader, offered, tus } from './tus'
-import { beginFootage, forgetUpload } from './writes'
+import { beginFootage, forgetUpload, noteReceived } from './writes'
 
 const version = '1.0.0'
 const chunkType = 'application/offset+octet-stream'
@@ -73,7 +73,10 @@ async function goOn(actor: Actor, request: Request, verb: string, uploadId: stri
   }
   if (request.headers.get('content-type') !== chunkType) throw wrongType(`Send the bytes as ${chunkType}.`)
   const checksum = parseChecksum(request.headers.get('upload-checksum'))
-  return chunk(request, checksum, footage.bytes, (body) => hand(request, 'PATCH', body, uploadId))
+  const response = await chunk(request, checksum, footage.bytes, (body) => hand(request, 'PATCH', body, uploadId))
+  const offset = Number(response.headers.get('upload-offset') ?? 0)
+  if (response.status === 204) await noteReceived(footage, offset)
+  return response
 }
 
 type Body = ReadableStream<Uint8Array> | null

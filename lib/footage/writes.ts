@@ -48,6 +48,12 @@ export async function finishFootage(footageId: string): Promise<boolean> {
   })
 }
 
+/** How far an upload has come, for whoever looks on; the bytes on disk are the truth that HEAD tells. */
+export async function noteReceived({ id, bytes }: Footage, offset: number): Promise<void> {
+  const progress = bytes > 0 ? Math.min(1, offset / bytes) : 0
+  await Footage.update({ progress }, { where: { id, state: 'receiving' } })
+}
+
 /** Forgets an upload that was given up: bytes first, so that a crash in between leaves a row that is found again. */
 export async function forgetUpload(footageId: string): Promise<void> {
   const { storage } = services()

@@ -91,6 +91,14 @@ describe('what follows the last byte', () => {
     expect((await waitingJobs('footage.inspect')).filter(({ data }) => data.footageId === upload)).toHaveLength(1)
   })
 
+  it('is told to the desk as it comes in', async () => {
+    const waiting = await makeEpisode(channel)
+    const upload = await begin(waiting.id, owner.id, 8)
+    await send(upload, owner.id, 0, bytes(6))
+    const answer = await call(readFootageOf, '/', { as: owner.id, params: { id: waiting.id } })
+    expect(await answer.json()).toMatchObject({ state: 'receiving', progress: 0.75, received: 6, bytes: 8 })
+  })
+
   it('is shown to the desk alone', async () => {
     const ask = (as?: string) =>
       call(readFootageOf, `/api/episodes/${episode.id}/footage`, { as, params: { id: episode.id } })
