@@ -9,7 +9,7 @@ const states = [
 ]
 
 const sorts = [
-  { value: 'urgency', label: 'What is of use soonest' },
+  { value: 'urgency', label: 'Of use soon, to many' },
   { value: 'asking', label: 'Most people asking' },
   { value: 'newest', label: 'Newest' },
 ]

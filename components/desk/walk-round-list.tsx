@@ -28,7 +28,9 @@ export function WalkRoundList({ base, lines }: { base: string; lines: WalkRoundL
               </h3>
               <p className="text-ink-2">
                 {detail}{' '}
-                {!ok && place && place.step !== 'walk-round' && <Link href={`${base}/${place.step}`}>See to it</Link>}
+                {place && place.step !== 'walk-round' && (!ok || rule === 'questions') && (
+                  <Link href={`${base}/${place.step}`}>{ok ? 'Questions and answers' : 'See to it'}</Link>
+                )}
               </p>
             </div>
           </li>

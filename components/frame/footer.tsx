@@ -16,8 +16,8 @@ export function Footer() {
         <div className="flex max-w-measure gap-4 text-sm text-ink-2">
           <Mark className="mt-1 shrink-0" />
           <p>
-            Lessons from working farms, filed by crop and growth stage. Figures in the handbook name the publication
-            they were held against. Labels, manuals, local codes and licensed people come first.
+            Lessons from working farms, filed by crop and growth stage. Figures in the handbook say what they were held
+            against, or that nobody has yet. Labels, manuals, local codes and licensed people come first.
           </p>
         </div>
         <nav aria-label="Foot of the page">

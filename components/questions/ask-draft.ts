@@ -33,17 +33,23 @@ function readDraft(): AskFields | null {
   }
 }
 
-/** Puts a kept draft into the fields that are still empty, as if it were typed. Fields are only those of the same place. */
-export function restoreDraft(form: HTMLFormElement): void {
+/**
+ * Puts a kept draft into the fields that are still empty, as if it were typed; only on the form of the same place.
+ * @returns whether anything was put back
+ */
+export function restoreDraft(form: HTMLFormElement): boolean {
   const draft = readDraft()
   const now = fieldsOf(new FormData(form))
-  if (!draft || draft.episodeId !== now.episodeId || (now.channel && draft.channel !== now.channel)) return
+  if (!draft || draft.episodeId !== now.episodeId || (now.channel && draft.channel !== now.channel)) return false
+  let restored = false
   for (const name of ['channel', 'title', 'body', 'about'] as const) {
     const field = form.elements.namedItem(name)
     const typed = field instanceof HTMLInputElement || field instanceof HTMLTextAreaElement
     const open = typed || field instanceof HTMLSelectElement
     if (!open || !draft[name] || (typed && field.value)) continue
     field.value = draft[name]
+    restored = true
     field.dispatchEvent(new Event('input', { bubbles: true }))
   }
+  return restored
 }

@@ -3,6 +3,7 @@
 import { useActionState, useEffect, useRef, useState, type FormEvent } from 'react'
 import { Button } from '@/components/ui/button'
 import { TextArea, TextField } from '@/components/ui/field'
+import { Notice } from '@/components/ui/notice'
 import { Select } from '@/components/ui/select'
 import { useHydrated } from '@/components/ui/use-hydrated'
 import { type AskFormState, sendQuestion } from '@/lib/questions/actions'
@@ -38,8 +39,9 @@ export function AskForm({ channels, fields: first, signedIn, here, fixedChannel 
   const sending = useSending({ signedIn, here })
   const hydrated = useHydrated()
   const { fields } = state
+  const [restored, setRestored] = useState(false)
   useEffect(() => {
-    if (form.current) restoreDraft(form.current)
+    if (form.current && restoreDraft(form.current)) setRestored(true)
   }, [])
   const follow = (event: FormEvent<HTMLFormElement>) => {
     keepDraft(event.currentTarget)
@@ -49,6 +51,12 @@ export function AskForm({ channels, fields: first, signedIn, here, fixedChannel 
   return (
     <div className="grid gap-8 lg:grid-cols-[minmax(0,1fr)_20rem]">
       <form ref={form} action={action} onSubmit={sending.submit} onInput={follow} className="sheet grid gap-5 p-5">
+        {restored && (
+          <Notice title="Your question is here as you wrote it.">
+            It is not sent yet. {signedIn ? 'Read it once more and press “Send the question”.' : 'Sign in to send it.'}{' '}
+            Photos have to be chosen again.
+          </Notice>
+        )}
         <AskProblem here={here} state={state} failure={sending.failure} />
         <input type="hidden" name="episodeId" value={fields.episodeId} />
         <input type="hidden" name="at" value={fields.at} />
@@ -84,7 +92,7 @@ export function AskForm({ channels, fields: first, signedIn, here, fixedChannel 
         {hydrated && <PhotoPicker />}
         <div className="flex flex-wrap items-center gap-4">
           <Button type="submit" busy={sending.isPending && 'Sending'}>
-            {signedIn ? 'Send the question' : 'Sign in and send'}
+            {signedIn ? 'Send the question' : 'Sign in to send it'}
           </Button>
           <p className="text-sm text-ink-3">Your name stands with it; your address is never shown.</p>
         </div>

@@ -7,9 +7,11 @@ import { useHydrated } from '@/components/ui/use-hydrated'
 import { type Standing, useAsking } from '@/lib/questions/hooks'
 
 type Props = {
-  question: { id: string; title: string; url: string } & Standing
+  question: { id: string; title: string; url: string; state: string } & Standing
   signedIn: boolean
 }
+
+const asked = (count: number) => (count === 1 ? '1 person asked this.' : `${count} people asked this.`)
 
 /** How many want the answer, and whether this person is among them. */
 export function AskingButton({ question, signedIn }: Props) {
@@ -17,6 +19,7 @@ export function AskingButton({ question, signedIn }: Props) {
   const hydrated = useHydrated()
   const change = useAsking(question.id)
   const { asking, youAreAsking } = standing
+  if (question.state === 'answered') return <p>{asked(asking)}</p>
   const words = asking === 1 ? '1 person is asking this' : `${asking} people are asking this`
   return (
     <div className="grid gap-3">

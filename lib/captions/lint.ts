@@ -2,7 +2,7 @@ import type { Finding } from './views'
 
 type Measured = { start: number; end: number; text: string }
 
-/** Levels of quality.md 4.4 (FCC 47 CFR 79.1(j)(2); DCMP Captioning Key): past `error` a reader cannot keep up. */
+/** Levels after FCC 47 CFR 79.1(j)(2) and the DCMP Captioning Key: past `error` a reader cannot keep up. */
 const LIMITS = {
   lines: { warn: 2, error: 3 },
   characters: { warn: 37, error: 42 },

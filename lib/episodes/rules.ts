@@ -76,7 +76,7 @@ function captionsLine(facts: WalkRoundFacts): WalkRoundLine {
 }
 
 function cautionsLine({ hazards, cautionsConfirmed }: WalkRoundFacts): WalkRoundLine {
-  if (hazards.length === 0) return { rule: 'cautions', ok: true, detail: 'No hazardous job is shown.' }
+  if (hazards.length === 0) return { rule: 'cautions', ok: true, detail: 'No chapter is filed under a hazardous job.' }
   return cautionsConfirmed
     ? { rule: 'cautions', ok: true, detail: `Confirmed for ${hazards.join(', ')}.` }
     : { rule: 'cautions', ok: false, detail: `Read and confirm the cautions for ${hazards.join(', ')}.` }
@@ -84,7 +84,9 @@ function cautionsLine({ hazards, cautionsConfirmed }: WalkRoundFacts): WalkRound
 
 function questionsLine({ bookedWithoutAnswer: open }: WalkRoundFacts): WalkRoundLine {
   const detail =
-    open === 0 ? 'Every booked question has its answer.' : `${open} booked without an answer; going back to the queue.`
+    open === 0
+      ? 'No booked question is without its answer.'
+      : `${open} booked without an answer yet; published so, it goes back to the queue.`
   return { rule: 'questions', ok: true, detail }
 }
 

@@ -36,7 +36,8 @@ export function isoDuration(position: number): string {
 
 /** How long something lasts, as a list says it: `48 s`, from a minute and a half on `12 min`, from an hour `1 h 5 min`. */
 export function lengthWords(length: number): string {
-  if (length < 90) return `${Math.round(length)} s`
+  // Cut like the clock of the player: 50.8 s is 0:50 there.
+  if (length < 90) return `${Math.floor(length)} s`
   const minutes = Math.round(length / 60)
   if (minutes < 60) return `${minutes} min`
   return `${Math.floor(minutes / 60)} h${minutes % 60 ? ` ${minutes % 60} min` : ''}`

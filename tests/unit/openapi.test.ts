@@ -4,7 +4,7 @@ import { routes } from '@/app/api/openapi.json/routes'
 import { describeApi } from '@/lib/http/openapi'
 
 /** Served by libraries that bring their own description: next-auth, tus. */
-const described = new Set(['/api/auth/{nextauth}', '/api/footage/{upload}'])
+const described = new Set(['/api/auth/{nextauth}', '/api/footage/{upload}', '/api/{nothing}'])
 
 const addressOf = (file: string) =>
   `/api/${file.replace(/\/?route\.ts$/, '')}`.replace(/\[+(?:\.\.\.)?([^\]]+)\]+/g, '{$1}')

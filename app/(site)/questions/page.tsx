@@ -22,7 +22,7 @@ export default async function QuestionsPage({ searchParams }: PageProps<'/questi
     <div className="page">
       <PageHead
         title="Questions"
-        lead="Asked by viewers, answered in a later episode. First those whose crop stage ends soonest."
+        lead="Asked by viewers, answered in a later episode. First what many are asking and what is of use soonest."
         actions={<ButtonLink href="/questions/ask">Ask a question</ButtonLink>}
       />
       <QuestionFilters channels={channels} filter={filter} action="/questions" />

@@ -26,7 +26,7 @@ export default async function ChannelQuestionsPage({ params, searchParams }: Pro
     <div className="page">
       <PageHead
         title={`Questions to ${channel.name}`}
-        lead="First those whose crop stage ends soonest on this farm."
+        lead="First what many are asking and what is of use soonest on this farm."
         actions={<ButtonLink href={askUrl}>Ask {channel.name}</ButtonLink>}
       />
       <QuestionFilters filter={filter} action={here} />
