@@ -26,6 +26,12 @@ const chapterOf = (episode: Episode, at: number) => {
   return chapter
 }
 
+/** Opens the episode and waits until the page answers: its own controls come with its script. */
+async function open(page: Page, query = '') {
+  await page.goto(`${address}${query}`)
+  await expect(page.getByRole('button', { name: 'Play', exact: true })).toBeVisible()
+}
+
 /** Everything that the browser complains about; a test that provokes a failure empties it. */
 let complaints: string[] = []
 test.beforeEach(({ page }) => {
@@ -38,7 +44,7 @@ test.afterEach(() => expect(complaints).toEqual([]))
 test('plays the film over HLS and says so in words', async ({ page }) => {
   const asked: string[] = []
   page.on('request', (request) => asked.push(new URL(request.url()).pathname))
-  await page.goto(address)
+  await open(page)
   expect(asked.some((path) => path.endsWith('.m3u8'))).toBe(false)
   await page.getByRole('button', { name: 'Play', exact: true }).click()
   await expect(page.getByRole('button', { name: 'Pause', exact: true })).toBeVisible()
@@ -51,7 +57,7 @@ test('plays the film over HLS and says so in words', async ({ page }) => {
 
 test('seeks by the keyboard alone, and names the place and the chapter', async ({ page, request }) => {
   const episode = await readEpisode(request)
-  await page.goto(address)
+  await open(page)
   await row(page).focus()
   await page.keyboard.press('PageDown')
   const second = chapterOf(episode, 1)
@@ -67,7 +73,7 @@ test('seeks by the keyboard alone, and names the place and the chapter', async (
 
 test('opens a link to a second at that second, with its sentence ruled', async ({ page, request }) => {
   const { start } = chapterOf(await readEpisode(request), 1)
-  await page.goto(`${address}?t=${start + 1}`)
+  await open(page, `?t=${start + 1}`)
   await expect(row(page)).toHaveAttribute('aria-valuenow', String(Math.floor(start + 1)))
   await expect.poll(() => filmAt(page)).toBeCloseTo(start + 1, 0)
   await expect(spoken(page).locator('[data-now]')).toBeInViewport()
@@ -78,7 +84,7 @@ test('opens a link to a second at that second, with its sentence ruled', async (
 })
 
 test('rules the sentence that is spoken, and seeks to a sentence that is clicked', async ({ page }) => {
-  await page.goto(address)
+  await open(page)
   const sentence = spoken(page).locator('[data-start]', { hasText: 'Count before you worry' })
   await sentence.click()
   await expect(sentence).toHaveAttribute('data-now', '')
@@ -92,7 +98,7 @@ test('rules the sentence that is spoken, and seeks to a sentence that is clicked
 test('leaves a reader alone who scrolls away, and follows again when asked', async ({ page, request }) => {
   const last = (await readEpisode(request)).chapters.length - 1
   await page.setViewportSize({ width: 1280, height: 700 })
-  await page.goto(address)
+  await open(page)
   await spoken(page).locator('p').first().hover()
   await page.mouse.wheel(0, 120)
   const follow = page.getByRole('button', { name: 'Follow the picture' })
@@ -107,7 +113,7 @@ test('leaves a reader alone who scrolls away, and follows again when asked', asy
 })
 
 test('opens the sheet of a term and gives the focus back', async ({ page }) => {
-  await page.goto(address)
+  await open(page)
   const term = spoken(page).locator('a[aria-haspopup="dialog"]').first()
   await term.focus()
   await page.keyboard.press('Enter')
@@ -122,7 +128,7 @@ test('opens the sheet of a term and gives the focus back', async ({ page }) => {
 test('turns from a question on the row to the second that answers it', async ({ page, request }) => {
   const question = (await readEpisode(request)).questions.find((one) => one.followUp)
   if (!question?.followUp) throw new Error('the demo episode has no answered question')
-  await page.goto(address)
+  await open(page)
   await page.getByRole('button', { name: new RegExp(`^Question at .*${question.title.replace('?', '\\?')}`) }).click()
   const turn = page.getByLabel('Chapters, readings and questions').getByRole('link')
   await expect(turn).toHaveAttribute('href', question.followUp.url)
@@ -133,7 +139,7 @@ test('turns from a question on the row to the second that answers it', async ({ 
 })
 
 test('finds words that are said and opens them', async ({ page }) => {
-  await page.goto(address)
+  await open(page)
   await page.getByRole('button', { name: 'Find in this episode' }).click()
   await page.getByLabel('Words said in this episode').fill('BROWN')
   const found = spoken(page).getByRole('search')
@@ -143,7 +149,7 @@ test('finds words that are said and opens them', async ({ page }) => {
 })
 
 test('lets captions, speed and picture be chosen from lists', async ({ page }) => {
-  await page.goto(address)
+  await open(page)
   await page.getByLabel('Speed').selectOption('1.5')
   await page.getByLabel('Captions').selectOption('off')
   await page.getByLabel('Picture and data').selectOption('240')
@@ -159,7 +165,7 @@ test('lets captions, speed and picture be chosen from lists', async ({ page }) =
 
 test('keeps the text usable when the film does not come through', async ({ page }) => {
   await page.route(/\/media\//, (route) => route.abort())
-  await page.goto(address)
+  await open(page)
   await page.getByRole('button', { name: 'Play', exact: true }).click()
   await expect(page.getByText('The film does not come through')).toBeVisible({ timeout: 60_000 })
   const sentence = spoken(page).locator('[data-start]', { hasText: 'Count before you worry' })
@@ -193,7 +199,7 @@ test.describe('on a phone', () => {
   test.use({ viewport: { width: 360, height: 800 } })
 
   test('keeps the picture in view over tabs that work from the keyboard', async ({ page }) => {
-    await page.goto(address)
+    await open(page)
     await page.getByRole('tab', { name: /^As spoken/ }).focus()
     await page.keyboard.press('ArrowRight')
     await expect(page.getByRole('tabpanel', { name: /^Readings \d+$/ })).toBeVisible()
@@ -212,7 +218,7 @@ test.describe('on a phone', () => {
   ] as const) {
     test(`scrolls one way only at ${width} by ${height}`, async ({ page }) => {
       await page.setViewportSize({ width, height })
-      await page.goto(address)
+      await open(page)
       expect(await page.evaluate(() => document.documentElement.scrollWidth)).toBeLessThanOrEqual(width)
     })
   }
@@ -227,7 +233,7 @@ for (const [scheme, width] of [
   test(`has nothing for axe to find, ${scheme} at ${width}`, async ({ page }) => {
     await page.emulateMedia({ colorScheme: scheme, reducedMotion: 'reduce' })
     await page.setViewportSize({ width, height: 900 })
-    await page.goto(`${address}?t=12`)
+    await open(page, '?t=12')
     await page.getByRole('button', { name: 'More' }).click()
     const { violations } = await new AxeBuilder({ page })
       .withTags(['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa'])

@@ -61,6 +61,11 @@ describe('the playback that film, row and text share', () => {
     expect(film.media.currentTime).toBe(90)
   })
 
+  it('is in the chapter it was sent to, though the browser keeps the place a hair short', () => {
+    film.plays(13.119999)
+    expect(playback.read().at).toBe(13.12)
+  })
+
   it('tells its listeners of changes only', () => {
     const listener = vi.fn()
     const stop = playback.subscribe(listener)
