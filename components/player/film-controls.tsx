@@ -26,7 +26,7 @@ export function FilmControls(props: FilmControlsProps) {
   const [more, setMore] = useState(false)
   const picture = pictureWords(asChoice(props.size), props.shown, props.sizes)
   return (
-    <div className="flex flex-wrap items-center gap-x-4 px-3.5 py-0.5 text-sm @min-[44rem]:px-4.5">
+    <div className="flex flex-wrap items-center gap-x-3 px-3.5 py-0.5 text-sm @min-[44rem]:gap-x-4 @min-[44rem]:px-4.5">
       <PlayButton />
       <Clock />
       <BarChoice

@@ -44,6 +44,7 @@ export function pictureWords(choice: PictureChoice, shown: number | null, sizes:
   const size = sizes.find((one) => one.height === height)
   return {
     full: `Picture: ${height}${uses(size)}`,
-    short: size && size.bytes > 0 ? `${height}, ${dataWords(size.bytes)}` : `Picture ${height}`,
+    // Never less than 1 MB here: the short form has no room for "under".
+    short: size && size.bytes > 0 ? `${height}, ${dataWords(Math.max(1e6, size.bytes))}` : `Picture ${height}`,
   }
 }

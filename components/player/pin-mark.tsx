@@ -4,7 +4,7 @@ import type { Pin } from './row-rules'
 /** The four marks: a gauge, a pennant that is solid when answered and open while waiting, a pencil's tick. */
 export function PinMark({ kind, className }: { kind: Pin['kind']; className?: string }) {
   return (
-    <svg viewBox="0 0 24 24" className={classNames('block size-6 shrink-0', className)} aria-hidden="true">
+    <svg viewBox="0 0 24 24" className={classNames('block size-[24px] shrink-0', className)} aria-hidden="true">
       {kind === 'reading' && (
         <>
           <rect

@@ -22,14 +22,12 @@ export function RowTurn({ pin, pins, lanes, duration, width }: RowTurnProps) {
   const drop = lineHeight / 2 + (highest - (lanes[at] ?? 0)) * laneHeight + laneHeight / 2
   // The words go where there is room for them.
   const leftwards = pin.at > duration / 2
+  const edge = `calc(${rowShare(pin.at, duration)} + ${leftwards ? 12 : -1}px)`
   return (
     <div className="relative text-sm" style={{ height: lineHeight }}>
       <div
-        className={classNames(
-          'absolute top-0 flex h-full items-center',
-          leftwards && '-translate-x-full flex-row-reverse',
-        )}
-        style={{ left: `calc(${rowShare(pin.at, duration)} + ${leftwards ? 12 : -1}px)` }}
+        className={classNames('absolute top-0 flex h-full items-center', leftwards && 'flex-row-reverse')}
+        style={leftwards ? { left: 0, right: `calc(100% - ${edge})` } : { left: edge, right: 0 }}
       >
         <svg
           width="8"
@@ -45,7 +43,7 @@ export function RowTurn({ pin, pins, lanes, duration, width }: RowTurnProps) {
           <path d={turnPath(drop, 0)} />
           <path d={turnPath(drop, apart)} />
         </svg>
-        <Link href={pin.turn.url} className="ml-1.5 bg-sheet px-1 whitespace-nowrap">
+        <Link href={pin.turn.url} className="mx-1.5 min-w-0 truncate bg-sheet px-1">
           {width >= 480 ? 'Answered in ' : 'In '}
           {pin.turn.words}
         </Link>
