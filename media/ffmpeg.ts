@@ -151,7 +151,7 @@ const isProgress = (line: string) => /^[a-z0-9_]+=\S*$|^\s*$|^(frame|fps|bitrate
 
 /** Runs ffprobe on one file and returns its standard output. @throws MediaFailure `invalid` when it cannot be read */
 export async function runFfprobe(path: string, options: string[], timeoutMs: number = limits.probeMs): Promise<string> {
-  const reach: Reach = { reads: [path], writes: null, cpuS: timeoutMs / 1000 + 5, fileBytes: 1e6, nice: 5 }
+  const reach: Reach = { reads: [path], writes: null, cpuS: timeoutMs / 1000 + 5, fileBytes: 1e6, nice: 0 }
   const prefix = fencedPrefix(await currentFence(), reach)
   const words = [...prefix, 'ffprobe', '-hide_banner', '-v', 'error', ...inputGuard(), ...options, `file:${path}`]
   return new Promise((resolve, reject) => {
