@@ -2,6 +2,7 @@ import type { Metadata, Viewport } from 'next'
 import { connection } from 'next/server'
 import type { ReactNode } from 'react'
 import { Providers } from '@/components/frame/providers'
+import { StagePatterns } from '@/components/ui/stage-patterns'
 import { fontVariables } from './fonts'
 import './globals.css'
 
@@ -27,6 +28,7 @@ export default async function RootLayout({ children }: { children: ReactNode }) 
   return (
     <html lang="en" className={fontVariables}>
       <body className="flex min-h-dvh flex-col">
+        <StagePatterns />
         <Providers>{children}</Providers>
       </body>
     </html>

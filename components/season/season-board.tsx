@@ -25,11 +25,14 @@ export const fieldWords = ({ field, areaAcres }: PlantingView, units: 'us' | 'me
 export function SeasonBoard({ season, episodes, today, units, episodesUrl }: SeasonBoardProps) {
   const span = boardSpan(season.year, season.plantings)
   const { lanes, rest } = lanesOf(season, episodes)
-  const todayAt = today >= span.from && today <= span.to ? dayAt(span, today) : null
+  const filmed = episodes.map(({ filmedOn }) => filmedOn).sort()
+  // A phone shows a part of the year: the part where something was filmed last, else the present.
+  const shown = filmed.findLast((day) => day <= today) ?? filmed[0] ?? today
+  const openAt = shown >= span.from && shown <= span.to ? dayAt(span, shown) : null
   const grid = <BoardGrid span={span} today={today} />
   return (
     <div className="sheet">
-      <BoardScroller today={todayAt}>
+      <BoardScroller openAt={openAt}>
         <BoardMonths span={span} />
         {lanes.map(({ planting, episodes: own }) => (
           <BoardLane

@@ -9,6 +9,7 @@ import { Notice } from '@/components/ui/notice'
 import { Progress } from '@/components/ui/progress'
 import { Select } from '@/components/ui/select'
 import { StagePatch } from '@/components/ui/stage-patch'
+import { StagePatterns } from '@/components/ui/stage-patterns'
 import { StageTag } from '@/components/ui/tag'
 import { stageKeys, stageWord } from '@/lib/topics/stage-words'
 
@@ -71,7 +72,8 @@ describe('a stage', () => {
   })
 
   it('has a pattern of its own, not only a colour', () => {
-    const tiles = stageKeys.map((stage) => drawn(<StagePatch stage={stage} />).querySelector('pattern path')?.outerHTML)
+    const page = drawn(<StagePatterns />)
+    const tiles = [...page.querySelectorAll('pattern path')].map((path) => path.outerHTML)
     expect(new Set(tiles).size).toBe(stageKeys.length)
   })
 
@@ -81,18 +83,19 @@ describe('a stage', () => {
     expect(found('svg').getAttribute('aria-label')).toBe('Flowering')
   })
 
-  it('draws from a pattern that is its own on a page with many, since a hidden one takes a shared one with it', () => {
-    drawn(
+  it('draws from the one pattern that every page carries, which is never hidden', () => {
+    const page = drawn(
       <>
-        <StagePatch stage="2" />
-        <StagePatch stage="2" />
+        <StagePatterns />
+        {stageKeys.map((stage) => (
+          <StagePatch key={stage} stage={stage} />
+        ))}
       </>,
     )
-    const ids = [...document.querySelectorAll('pattern')].map(({ id }) => id)
-    expect(new Set(ids).size).toBe(2)
-    expect([...document.querySelectorAll('svg > rect')].map((rect) => rect.getAttribute('fill'))).toEqual(
-      ids.map((id) => `url(#${id})`),
-    )
+    const ids = [...page.querySelectorAll('pattern')].map(({ id }) => id)
+    const used = [...page.querySelectorAll('svg > rect')].map((rect) => rect.getAttribute('fill'))
+    expect(used).toEqual(ids.map((id) => `url(#${id})`))
+    expect(page.querySelector('svg')?.getAttribute('class')).not.toContain('hidden')
   })
 })
 
