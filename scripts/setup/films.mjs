@@ -1,7 +1,7 @@
 import { setTimeout as sleep } from 'node:timers/promises'
 import { Trouble } from './trouble.mjs'
 
-const patienceMinutes = 20
+const patienceMinutes = 15
 
 async function ask(url) {
   const answer = await fetch(url, { signal: AbortSignal.timeout(20_000) })
@@ -18,14 +18,18 @@ async function lookAtFilms(baseUrl) {
   return { all: episodes.length, waiting: episodes.filter(({ film }) => !film).map(({ title }) => title) }
 }
 
-/** Waits until the worker has drawn and encoded every published film. Throws Trouble with the titles that never came. */
+/**
+ * Waits until the worker has drawn and encoded every published film, however slow the machine, as long as they keep
+ * coming. Throws Trouble with the titles that never came.
+ */
 export async function waitForFilms(house, baseUrl, say) {
-  const until = performance.now() + patienceMinutes * 60_000
-  for (;;) {
+  let [left, since] = [Infinity, performance.now()]
+  while (!house.stopping) {
     const { all, waiting } = await lookAtFilms(baseUrl)
-    if (waiting.length === 0 || house.stopping) return
-    if (performance.now() > until)
-      throw new Trouble(`After ${patienceMinutes} minutes there is no film for: ${waiting.join(', ')}.`)
+    if (waiting.length === 0) return
+    if (waiting.length < left) [left, since] = [waiting.length, performance.now()]
+    if (performance.now() - since > patienceMinutes * 60_000)
+      throw new Trouble(`For ${patienceMinutes} minutes no film came for: ${waiting.join(', ')}.`)
     say(`${all - waiting.length} of ${all} films`)
     await sleep(1000)
   }
