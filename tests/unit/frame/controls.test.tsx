@@ -73,7 +73,7 @@ describe('a stage', () => {
 
   it('has a pattern of its own, not only a colour', () => {
     const page = drawn(<StagePatterns />)
-    const tiles = [...page.querySelectorAll('pattern path')].map((path) => path.outerHTML)
+    const tiles = [...page.querySelectorAll('pattern')].map((pattern) => pattern.innerHTML)
     expect(new Set(tiles).size).toBe(stageKeys.length)
   })
 
