@@ -26,16 +26,19 @@ export function ChaptersEditor({ episode: first }: { episode: EpisodeView }) {
     setTouched(true)
     edit.reset()
   }
-  const take = (current: EpisodeView) => {
+  const settle = (current: EpisodeView) => {
     setDrafts(draftsOf(current))
     setTouched(false)
     setPressed(false)
+  }
+  const take = (current: EpisodeView) => {
+    settle(current)
     edit.reset()
   }
   const save = (edition: number) => {
     setPressed(true)
     if (!drafts.every(isSound)) return
-    edit.mutate({ path: '/chapters', method: 'PUT', body: chaptersBody(drafts), edition }, { onSuccess: take })
+    edit.mutate({ path: '/chapters', method: 'PUT', body: chaptersBody(drafts), edition }, { onSuccess: settle })
   }
 
   return (
