@@ -31,7 +31,7 @@ function build(): NextAuthOptions {
     ],
     callbacks: {
       async jwt({ token, user }) {
-        return user ? { sub: user.id, sid: await openSession(user.id) } : token
+        return user ? { sub: user.id, name: user.name, sid: await openSession(user.id) } : token
       },
       async session({ session, token }) {
         if (typeof token.sid !== 'string' || !(await isOpen(token.sid))) return { expires: session.expires }
