@@ -104,6 +104,14 @@ export function lanesOf(pins: readonly { at: number }[], duration: number, width
   })
 }
 
+/**
+ * A place as it is announced: it changes once a second, and stays in the chapter of the exact place. A chapter that
+ * starts at 13.05 is not the one before because its second is 13.
+ */
+export function announcedPlace(at: number, chapters: readonly RowChapter[]): number {
+  return Math.max(Math.floor(at), chapters[chapterAt(chapters, at) ?? -1]?.start ?? 0)
+}
+
 /** What the seek control says: "3 minutes 12 seconds of 12 minutes 4 seconds, Throwing the hoop". */
 export function placeWords(at: number, duration: number, chapters: readonly RowChapter[]): string {
   const chapter = chapters[chapterAt(chapters, at) ?? -1]

@@ -5,16 +5,16 @@ import { classNames } from '@/components/ui/class-names'
 import { StagePatch } from '@/components/ui/stage-patch'
 import { chapterAt } from '@/lib/captions/rules'
 import { timeCode } from '@/lib/times/rules'
-import { useMoment, usePlayback, wholeSecond } from './playback-context'
+import { useMoment, usePlayback } from './playback-context'
 import { placeAfterKey } from './player-keys'
-import { placeWords, rowShare, type RowChapter } from './row-rules'
+import { announcedPlace, placeWords, rowShare, type RowChapter } from './row-rules'
 
 /** The blocks and the needle: one slider, for pointer and keyboard alike. */
 export function RowSlider({ chapters }: { chapters: RowChapter[] }) {
   const playback = usePlayback()
   const duration = useMoment((moment) => moment.duration)
   const [drawn, setDrawn] = useState<number | null>(null)
-  const said = useSaidSecond()
+  const said = useSaidPlace(chapters)
 
   const go = (to: number) => {
     said.hold(to)
@@ -40,8 +40,8 @@ export function RowSlider({ chapters }: { chapters: RowChapter[] }) {
       aria-label="Place in the film"
       aria-valuemin={0}
       aria-valuemax={Math.floor(duration)}
-      aria-valuenow={said.second}
-      aria-valuetext={placeWords(said.second, duration, chapters)}
+      aria-valuenow={Math.floor(said.place)}
+      aria-valuetext={placeWords(said.place, duration, chapters)}
       className="relative h-11 cursor-pointer touch-pan-y outline-offset-6 select-none"
       onFocus={said.onFocus}
       onBlur={said.onBlur}
@@ -65,17 +65,17 @@ export function RowSlider({ chapters }: { chapters: RowChapter[] }) {
 }
 
 /**
- * The second that is announced. While the film plays and the slider has the focus it stands still between moves: a
+ * The place that is announced. While the film plays and the slider has the focus it stands still between moves: a
  * screen reader would otherwise speak over the film once a second.
  */
-function useSaidSecond() {
-  const second = useMoment(wholeSecond)
+function useSaidPlace(chapters: RowChapter[]) {
+  const place = useMoment((moment) => announcedPlace(moment.at, chapters))
   const playing = useMoment((moment) => moment.playing)
   const [held, setHeld] = useState<number | null>(null)
   return {
-    second: held !== null && playing ? held : second,
-    hold: (at: number) => setHeld((before) => (before === null ? null : Math.floor(at))),
-    onFocus: () => setHeld(second),
+    place: held !== null && playing ? held : place,
+    hold: (at: number) => setHeld((before) => (before === null ? null : announcedPlace(at, chapters))),
+    onFocus: () => setHeld(place),
     onBlur: () => setHeld(null),
   }
 }

@@ -1,6 +1,15 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
-import { lanesOf, pinSize, pinsOf, placeWords, readingParts, rowShare, turningPin } from '@/components/player/row-rules'
+import {
+  announcedPlace,
+  lanesOf,
+  pinSize,
+  pinsOf,
+  placeWords,
+  readingParts,
+  rowShare,
+  turningPin,
+} from '@/components/player/row-rules'
 
 const chapters = [
   { start: 0, end: 160, title: 'Why we count now', stage: null },
@@ -97,5 +106,16 @@ describe('pins', () => {
         }
       }),
     )
+  })
+})
+
+describe('a place as it is announced', () => {
+  const short = [
+    { start: 0, end: 13.053, title: 'One', stage: null },
+    { start: 13.053, end: 60, title: 'Two', stage: null },
+  ]
+
+  it('is a whole second, but never one of the chapter before', () => {
+    expect([0.4, 13.02, 13.053, 13.9, 14.2].map((at) => announcedPlace(at, short))).toEqual([0, 13, 13.053, 13.053, 14])
   })
 })
