@@ -61,7 +61,11 @@ describe('people of a channel', () => {
 describe('an invitation', () => {
   it('is a letter whose link opens a place for that address alone, once', async () => {
     const guest = await makeUser()
-    const asked = await call(invite, '/x', { body: { email: guest.email, role: 'adviser' }, as: owner.id, params: at() })
+    const asked = await call(invite, '/x', {
+      body: { email: guest.email, role: 'adviser' },
+      as: owner.id,
+      params: at(),
+    })
     expect(asked.status).toBe(201)
     const letter = await Letter.findOne({ where: { toAddress: guest.email } })
     const token = /\/join\/(\S+)/.exec(letter?.text ?? '')?.[1] ?? ''
@@ -79,7 +83,10 @@ describe('a token for scripts', () => {
     const made = await call(makeToken, '/x', { body: { name: 'Weather feed' }, as: owner.id })
     const { id, token } = (await made.json()) as { id: string; token: string }
     const asScript = () => call(me, '/x', { headers: { authorization: `Bearer ${token}` } })
-    expect(await (await asScript()).json()).toMatchObject({ id: owner.id, channels: [{ slug: channel.slug, role: 'owner' }] })
+    expect(await (await asScript()).json()).toMatchObject({
+      id: owner.id,
+      channels: [{ slug: channel.slug, role: 'owner' }],
+    })
     const end = (as: string) => call(endToken, '/x', { method: 'DELETE', as, params: { id } })
     expect((await end(editor.id)).status).toBe(404)
     expect((await end(owner.id)).status).toBe(204)
