@@ -1,3 +1,4 @@
+import { CautionNotes } from '@/components/questions/caution-notes'
 import type { CueText } from '@/lib/captions/rules'
 import type { EpisodeView } from '@/lib/episodes/views'
 import type { TermNote } from '@/lib/handbook/views'
@@ -12,7 +13,6 @@ import { PlaybackProvider } from './playback-context'
 import { QuestionsPanel } from './questions-panel'
 import { ReadingsPanel } from './readings-panel'
 import { TheRow } from './the-row'
-import { WatchCautions } from './watch-cautions'
 import { WatchHead } from './watch-head'
 import { WatchPanels } from './watch-panels'
 
@@ -38,7 +38,7 @@ export function Watch({ episode, spoken, notes, askName, openAt }: WatchProps) {
     <PlaybackProvider key={episode.id} at={Math.min(openAt ?? 0, duration)} duration={duration}>
       <KeptPlace episodeId={episode.id} openAt={openAt} />
       <div className="flex flex-col max-lg:-mx-[clamp(0.875rem,2.5vw,2rem)] lg:grid lg:grid-cols-[minmax(0,1.55fr)_minmax(0,1fr)] lg:grid-rows-[auto_auto_auto_1fr]">
-        <WatchHead episode={episode} cautions={<WatchCautions cautions={cautionsOf(episode)} />}>
+        <WatchHead episode={episode} cautions={<CautionNotes cautions={cautionsOf(episode)} />}>
           {published && <AskHere episodeId={episode.id} askName={askName} className="max-lg:hidden print:hidden" />}
         </WatchHead>
         <div

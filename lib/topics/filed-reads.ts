@@ -4,7 +4,7 @@ import { crops, type Crop } from './crops'
 import { topicByCode } from './rules'
 import { stageKeys, type StageKey } from './stage-words'
 
-type FiledStages = { crop: Crop; stages: StageKey[] }
+export type FiledStages = { crop: Crop; stages: StageKey[] }
 
 /** Crops and their principal stages that published chapters are filed under, in the order of the pickers. */
 export async function filedStages(): Promise<FiledStages[]> {
