@@ -70,7 +70,7 @@ it('fails the start with the last words of a server that ends before it is ready
 })
 
 it('does not take the words of an earlier life for readiness', async () => {
-  plan(`console.log('ready')`)
+  plan(`console.log('ready'); setInterval(() => {}, 1000)`)
   await server.start()
   await server.stop(1)
   plan(`console.log('still thinking'); setInterval(() => {}, 1000)`, { readySeconds: 1 })
