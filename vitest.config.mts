@@ -18,7 +18,8 @@ export default defineConfig({
     // A forgotten `.only` would let the rest pass unseen.
     allowOnly: false,
     projects: [
-      { resolve, test: { name: 'unit', include: files('unit') } },
+      // Long ropes throughout: a busy machine is not a failure.
+      { resolve, test: { name: 'unit', include: files('unit'), testTimeout: 60_000, hookTimeout: 60_000 } },
       {
         resolve,
         test: {
@@ -26,11 +27,10 @@ export default defineConfig({
           env: { LOG_LEVEL: 'silent' },
           include: files('service'),
           globalSetup: ['tests/support/global-database.ts'],
-          testTimeout: 30_000,
-          hookTimeout: 60_000,
+          testTimeout: 120_000,
+          hookTimeout: 120_000,
         },
       },
-      // ffmpeg and real child processes: a long rope, so that a busy machine is not a failure.
       { resolve, test: { name: 'media', include: files('media'), testTimeout: 180_000, hookTimeout: 180_000 } },
     ],
   },
