@@ -74,7 +74,12 @@ export class SupervisedServer {
     const log = loud ? 'inherit' : openLog(logFile)
     if (!loud) this.#logFrom = fstatSync(log).size
     // A group of its own (detached): Ctrl-C must reach us alone, for the order of the end is ours.
-    const options = { cwd, env, detached: true, stdio: ['ignore', log, log, 'ipc'] }
+    const options = {
+      cwd,
+      env: { ...env, TURNROW_STARTER: String(process.pid) },
+      detached: true,
+      stdio: ['ignore', log, log, 'ipc'],
+    }
     const child = spawn(process.execPath, ['--import', followParent, ...args], options)
     if (!loud) closeSync(log)
     this.#child = child
