@@ -1,7 +1,6 @@
 import { queryOptions, useMutation, useQuery, useQueryClient } from '@tanstack/react-query'
 import { useRouter } from 'next/navigation'
 import { api, type ApiProblem } from '@/lib/http/client'
-import type { EpisodePatch } from './schema'
 import type { EpisodeView } from './views'
 
 export const episodeKey = (id: string) => ['episode', id] as const
@@ -42,4 +41,3 @@ export function useEpisodeEdit(id: string) {
 }
 
 export type EpisodeEdit = ReturnType<typeof useEpisodeEdit>
-export type { EpisodePatch }

@@ -28,7 +28,7 @@ export type WalkRoundFacts = {
   durationMs: number | null
   language: string
   chapters: { startMs: number; title: string; topics: number }[]
-  captions: { language: string; cues: number; lastEndMs: number; checked: boolean }[]
+  captions: { language: string; cues: number; checked: boolean }[]
   hazards: string[]
   cautionsConfirmed: boolean
   bookedWithoutAnswer: number

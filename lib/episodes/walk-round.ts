@@ -11,7 +11,7 @@ import { EPISODE } from './reads'
 import { type WalkRoundFacts, type WalkRoundLine, walkRound } from './rules'
 
 type ChapterRow = { start_ms: number; title: string; codes: string[] }
-type TrackRow = { language: string; checked: boolean; cues: string; last_end_ms: number | null }
+type TrackRow = { language: string; checked: boolean; cues: string }
 
 const select = <T extends object>(sql: string, id: string, transaction?: Transaction) =>
   db().query<T>(sql, { bind: [id], type: QueryTypes.SELECT, transaction })
@@ -27,7 +27,7 @@ const chaptersOf = (id: string, transaction?: Transaction) =>
 
 const tracksOf = (id: string, transaction?: Transaction) =>
   select<TrackRow>(
-    `select t.language, t.checked, count(c.id) as cues, max(c.end_ms) as last_end_ms
+    `select t.language, t.checked, count(c.id) as cues
      from caption_tracks t left join cues c on c.track_id = t.id
      where t.episode_id = $1 and t.kind in ('captions', 'subtitles') group by t.id`,
     id,
@@ -62,11 +62,10 @@ export async function walkRoundFacts(episode: Episode, transaction?: Transaction
     durationMs: shown?.durationMs ?? null,
     language: episode.language,
     chapters: chapters.map(({ start_ms, title, codes }) => ({ startMs: start_ms, title, topics: codes.length })),
-    captions: tracks.map(({ language, checked, cues, last_end_ms }) => ({
+    captions: tracks.map(({ language, checked, cues }) => ({
       language,
       checked,
       cues: Number(cues),
-      lastEndMs: last_end_ms ?? 0,
     })),
     hazards: hazardsOf(chapters),
     cautionsConfirmed: episode.cautionsConfirmedAt !== null,
